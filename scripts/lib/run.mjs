@@ -1,0 +1,43 @@
+// Small wrappers around child processes. Plain Node: this runs before the packages are installed.
+import { spawn, spawnSync } from "node:child_process";
+
+/** Wording of a command for a message, e.g. `npm ci`. */
+const wording = (command, args) => [command, ...args].join(" ");
+
+/**
+ * Runs a command to its end and returns what it printed.
+ * Options are those of `spawn`, and `input` is written to its standard input.
+ * Throws an error that carries the end of the output when the command fails.
+ */
+export function capture(command, args, options = {}) {
+  const result = spawnSync(command, args, { encoding: "utf8", maxBuffer: 64 * 1024 * 1024, ...options });
+  if (result.error) throw new Error(`${command} could not be run: ${result.error.message}`);
+  if (result.status !== 0) {
+    const tail = `${result.stdout}\n${result.stderr}`.trim().split("\n").slice(-15).join("\n");
+    throw new Error(`${wording(command, args)} failed:\n${tail}`);
+  }
+  return result.stdout.trim();
+}
+
+/** True when the command can be run and ends well; prints nothing. */
+export function succeeds(command, args, options = {}) {
+  return spawnSync(command, args, { stdio: "ignore", ...options }).status === 0;
+}
+
+/** Runs a command with its output on the screen. Resolves to the exit code; never rejects. */
+export function show(command, args, options = {}) {
+  return new Promise((resolve) => {
+    const child = spawn(command, args, { stdio: "inherit", ...options });
+    child.once("error", (error) => {
+      console.error(`${command} could not be run: ${error.message}`);
+      resolve(1);
+    });
+    child.once("exit", (code, signal) => resolve(code ?? (signal ? 1 : 0)));
+  });
+}
+
+/** Like `show`, but throws when the command fails. */
+export async function showOrThrow(command, args, options = {}) {
+  const code = await show(command, args, options);
+  if (code !== 0) throw new Error(`${wording(command, args)} failed with exit code ${code}.`);
+}
