@@ -1,0 +1,35 @@
+import type { Actor } from "@/lib/shared/actor";
+
+/**
+ * Who is looking, reduced to what decides visibility. Lists and single reads narrow by it in SQL:
+ * - an area or site with visibility `members` exists only for its members;
+ * - a `sensitive` site shows outsiders its name and a rounded point, and nothing it could be found by.
+ */
+export interface Audience {
+  /** Sees everything everywhere. */
+  everything: boolean;
+  /** Areas whose hidden and sensitive parts are visible. */
+  memberAreaIds: readonly string[];
+  /** Stable key for caches: the same key sees the same things. */
+  key: string;
+}
+
+export const PUBLIC_AUDIENCE: Audience = { everything: false, memberAreaIds: [], key: "public" };
+
+export function audience(actor: Actor): Audience {
+  if (actor.kind === "visitor") return PUBLIC_AUDIENCE;
+  if (actor.isAdmin) return { everything: true, memberAreaIds: [], key: "everything" };
+  const memberAreaIds = Object.keys(actor.roles).toSorted();
+  if (memberAreaIds.length === 0) return PUBLIC_AUDIENCE;
+  return { everything: false, memberAreaIds, key: `areas:${memberAreaIds.join(",")}` };
+}
+
+/** Member of the area, whatever the role. */
+export function isMember(who: Audience, areaId: string): boolean {
+  return who.everything || who.memberAreaIds.includes(areaId);
+}
+
+/** About 1 km: two decimals of latitude. Used for sensitive sites shown to outsiders. */
+export function roundedPoint(point: { lon: number; lat: number }): { lon: number; lat: number } {
+  return { lon: Math.round(point.lon * 100) / 100, lat: Math.round(point.lat * 100) / 100 };
+}

@@ -1,0 +1,22 @@
+import type { NextConfig } from "next";
+
+const config: NextConfig = {
+  poweredByHeader: false,
+  distDir: process.env.BYSSUS_DIST_DIR ?? ".next",
+  serverExternalPackages: [
+    "@node-rs/argon2",
+    "rate-limiter-flexible",
+    "pino",
+    "sharp",
+    "smtp-server",
+    "mailparser",
+    "nodemailer",
+    "postgres",
+  ],
+  typedRoutes: false,
+  experimental: {
+    serverActions: { bodySizeLimit: "2mb" },
+  },
+};
+
+export default config;
