@@ -1,0 +1,20 @@
+/** The public surface of the engineering layer: pure numbers, SI inside, one formula a file. */
+export * from "./units";
+export * from "./corrosion";
+export { placeClass } from "./place-class";
+export { metalAgainstClass, classOf, rank } from "./metal-class";
+export { metalAgainstStressCorrosion } from "./stress-corrosion";
+export type * from "./capacity";
+export { estimateRodEye } from "./rod-eye";
+export { estimateStud } from "./stud";
+export { estimateBond } from "./bond";
+export { estimateRockCone } from "./rock-cone";
+export { groupFactor } from "./group-factor";
+export { edgeBreakoutN } from "./edge-breakout";
+export { utilisation } from "./utilisation";
+export { governing } from "./governing";
+export { corrosionDepthM } from "./corrosion-depth";
+export { remainingRod } from "./remaining-rod";
+export { coatingLifeYears } from "./coating-life";
+export { cureRow } from "./cure-row";
+export type { CureRow } from "./cure-row";
