@@ -145,6 +145,8 @@ export interface GroupFacts {
   backupCount: number;
   /** True when every main placement has a position and the masterpoint is known. */
   hasGeometry: boolean;
+  /** A line of protection bolts on one sheet: each carries all by itself. */
+  isRow?: boolean;
   rockBodies: readonly { rockBodyId: string; attachment: Attachment; label: string }[];
   placements: readonly PlacementFacts[];
 }
@@ -165,6 +167,8 @@ export interface BoltEvidence {
   demand: Demand;
   /** The date the question is asked for, `YYYY-MM-DD`. */
   onDate: string;
+  /** The UTC instant of a question about now; absent: any time of `onDate`. Only curing asks for the hour. */
+  atUtc?: string;
   placement: PlacementFacts | null;
   group: GroupFacts | null;
   care: CareFacts | null;
