@@ -198,3 +198,8 @@ export interface AnchorEvidence {
   /** One entry a use of each current bolt. */
   bolts: readonly { boltId: string; placementNumber: number; evidence: BoltEvidence }[];
 }
+
+/** An anchor held against one of its uses. */
+export interface AnchorQuestion extends AnchorEvidence {
+  use: Use;
+}
