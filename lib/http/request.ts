@@ -1,0 +1,76 @@
+import "server-only";
+import { AppError } from "@/lib/shared/errors";
+
+/** Largest JSON body taken, bytes. */
+const MAX_JSON_BYTES = 1_000_000;
+const UNSAFE = new Set(["POST", "PUT", "PATCH", "DELETE"]);
+
+/** The request itself is not well formed: nothing a field error could say. */
+export class MalformedRequest extends Error {
+  constructor(
+    readonly status: number,
+    readonly title: string,
+    message: string,
+  ) {
+    super(message);
+    this.name = "MalformedRequest";
+  }
+}
+
+/**
+ * A browser sends the session cookie along with any request, so a write from another site's page is refused.
+ * Programs send a bearer token and no cookie: they pass.
+ */
+export function refuseForeignOrigin(request: Request): void {
+  if (!UNSAFE.has(request.method) || request.headers.has("authorization")) return;
+  const site = request.headers.get("sec-fetch-site");
+  const origin = request.headers.get("origin");
+  const foreignSite = site !== null && site !== "same-origin" && site !== "none";
+  const foreignOrigin = origin !== null && new URL(origin).host !== request.headers.get("host");
+  if (foreignSite || foreignOrigin) {
+    throw new AppError("forbidden", "This request came from another site's page.");
+  }
+}
+
+/** @throws MalformedRequest 400 when it is not JSON, 415 when it does not say so; AppError `too_large`. */
+export async function readJson(request: Request): Promise<unknown> {
+  const type = request.headers.get("content-type") ?? "";
+  if (!/^application\/([\w.-]+\+)?json\b/.test(type)) {
+    throw new MalformedRequest(
+      415,
+      "Unsupported media type",
+      "Send JSON with content-type application/json.",
+    );
+  }
+  if (Number(request.headers.get("content-length") ?? 0) > MAX_JSON_BYTES) throw tooLarge();
+  const text = await request.text();
+  if (Buffer.byteLength(text) > MAX_JSON_BYTES) throw tooLarge();
+  try {
+    return JSON.parse(text);
+  } catch {
+    throw new MalformedRequest(400, "Malformed JSON", "The body is not valid JSON.");
+  }
+}
+
+/** The version the sender last saw. @throws MalformedRequest 428 without `If-Match`. */
+export function versionWanted(request: Request): number {
+  const header = request.headers.get("if-match");
+  const version = /^(?:W\/)?"(\d+)"$/.exec(header ?? "")?.[1];
+  if (!version) {
+    throw new MalformedRequest(
+      428,
+      "Precondition required",
+      'Send If-Match with the version you last read, for example If-Match: "3".',
+    );
+  }
+  return Number(version);
+}
+
+/** ETag of a record's version, the one `If-Match` takes back. */
+export function versionTag(version: number): string {
+  return `"${version}"`;
+}
+
+function tooLarge(): AppError {
+  return new AppError("too_large", "The body is larger than 1 MB.");
+}
