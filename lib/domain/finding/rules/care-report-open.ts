@@ -1,29 +1,11 @@
-import type { Level, ReportKind } from "@/lib/domain/vocabulary";
+import type { ReportKind } from "@/lib/domain/vocabulary";
 import type { CareFacts, OpenReportFacts } from "@/lib/domain/finding/evidence";
-import { isOutOfUseAtOnce } from "@/lib/domain/finding/out-of-use";
-import { severity } from "@/lib/domain/finding/traits";
+import { standingReports } from "@/lib/domain/finding/open-reports";
 import type { Finding } from "@/lib/domain/finding/types";
 
-const LOOSE: readonly ReportKind[] = ["nut_loose", "hanger_spins", "stud_turns"];
-const DEPTH = { seen: 0, handled: 1, torqued: 2, pulled: 3 } as const;
-
-/**
- * care.report-open: the worst report nobody has answered yet.
- *
- * What takes a bolt out of use counts until it is answered. Everything else is ordered by when it was observed: a newer
- * routine check that found nothing, made at least as close up, supersedes it. A report through a tag without an
- * account is not proof: what would stop asks until a member confirms it. A missing bolt stops.
- */
+/** care.report-open: the worst report nobody has answered yet; see `standingReports` for which ones count. */
 export function careReportOpen(e: { care: CareFacts | null }): Finding | null {
-  const reports = e.care?.openReports ?? [];
-  const found = reports
-    .filter((report) => lasts(report) || !isSuperseded(report, reports))
-    .map((report) => ({ report, level: levelOf(report) }))
-    .filter((one): one is typeof one & { level: Level } => one.level !== null)
-    .sort(
-      (a, b) =>
-        severity(b.level) - severity(a.level) || a.report.observedAt.localeCompare(b.report.observedAt),
-    );
+  const found = standingReports(e.care?.openReports ?? []);
   const [worst] = found;
   if (worst === undefined) return null;
   const { report, level } = worst;
@@ -67,34 +49,6 @@ const TITLES: Readonly<Record<ReportKind, string>> = {
   not_in_register: "Report of something not in the register",
   other: "Open report",
 };
-
-/** Counts until answered, whatever was seen later. */
-function lasts(report: OpenReportFacts): boolean {
-  return isOutOfUseAtOnce(report) || report.kind === "missing";
-}
-
-function isSuperseded(report: OpenReportFacts, all: readonly OpenReportFacts[]): boolean {
-  return all.some(
-    (newer) =>
-      newer.kind === "routine_check" &&
-      newer.grade === 0 &&
-      newer.confirmed &&
-      newer.observedAt > report.observedAt &&
-      DEPTH[newer.depth] >= DEPTH[report.depth],
-  );
-}
-
-function levelOf(report: OpenReportFacts): Level | null {
-  const level = levelIfTrue(report);
-  return level === "stop" && !report.confirmed ? "ask" : level;
-}
-
-function levelIfTrue(report: OpenReportFacts): Level | null {
-  if (lasts(report) || report.grade === 4) return "stop";
-  if (report.grade === 3 || LOOSE.includes(report.kind)) return "limit";
-  if (report.grade === 0) return null;
-  return report.kind === "routine_check" && report.grade === null ? null : "note";
-}
 
 function seen(report: OpenReportFacts): string {
   const by = report.confirmed ? "" : ", through a tag without an account and not confirmed";

@@ -13,7 +13,7 @@ import { list, percent, sentence, years } from "@/lib/domain/finding/words";
 /** Sea distance within which zinc is no protection, m (common practice). */
 const SEA_STOP_M = 1_000;
 /** Section lost that ends a bolt's life (common practice). */
-export const LOST_STOP = 0.1;
+const LOST_STOP = 0.1;
 const RUST_STOP = 3;
 
 /**
