@@ -24,7 +24,7 @@ export function Badge({
   return (
     <span
       className={cx(
-        "type-label inline-flex items-center gap-1.5 rounded-sm border px-1.5 py-0.5 align-middle",
+        "inline-flex items-center gap-1.5 rounded-sm border px-1.5 py-0.5 align-middle type-label",
         TONES[tone],
         className,
       )}

@@ -15,7 +15,7 @@ export function Checkbox({ name, id, label, hint, error, className, ...rest }: C
   const { inputId, describedBy, invalid } = fieldIds({ name, id, label, hint, error });
   return (
     <div className={cx("grid gap-1", error && "border-l-4 border-stop-fill pl-3", className)}>
-      <label htmlFor={inputId} className="touch flex cursor-pointer items-start gap-3 py-2.5">
+      <label htmlFor={inputId} className="flex touch cursor-pointer items-start gap-3 py-2.5">
         <input
           id={inputId}
           name={name}

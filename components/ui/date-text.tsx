@@ -11,7 +11,11 @@ export function PastDate({
   unknown?: string;
 }) {
   if (on === null) return <span className="text-muted">{unknown}</span>;
-  return <time dateTime={precision === "year" || precision === "before" ? on.slice(0, 4) : on}>{formatPastDate(on, precision)}</time>;
+  return (
+    <time dateTime={precision === "year" || precision === "before" ? on.slice(0, 4) : on}>
+      {formatPastDate(on, precision)}
+    </time>
+  );
 }
 
 /** A moment, told in the time zone of the place it belongs to. */

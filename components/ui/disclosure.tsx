@@ -15,8 +15,12 @@ export function Disclosure({
 }) {
   return (
     <details open={open} className={cx("group border-y border-line", className)}>
-      <summary className="touch flex cursor-pointer list-none items-center gap-2 py-2 font-semibold hover:text-action [&::-webkit-details-marker]:hidden">
-        <svg viewBox="0 0 12 12" aria-hidden="true" className="size-3 shrink-0 text-muted transition-transform group-open:rotate-90">
+      <summary className="flex touch cursor-pointer list-none items-center gap-2 py-2 font-semibold hover:text-action [&::-webkit-details-marker]:hidden">
+        <svg
+          viewBox="0 0 12 12"
+          aria-hidden="true"
+          className="size-3 shrink-0 text-muted transition-transform group-open:rotate-90"
+        >
           <path d="M3.5 1 9 6l-5.5 5" fill="none" stroke="currentColor" strokeWidth="1.75" />
         </svg>
         {summary}

@@ -36,7 +36,11 @@ export function ErrorSummary({
             {problem.path === "" ? (
               problem.message
             ) : (
-              <a href={`#${problem.path}`} className="inline-block py-1 underline underline-offset-2" onClick={focusField}>
+              <a
+                href={`#${problem.path}`}
+                className="inline-block py-1 underline underline-offset-2"
+                onClick={focusField}
+              >
                 {problem.message}
               </a>
             )}

@@ -9,7 +9,7 @@ export function Facts({ children, className }: { children: ReactNode; className?
 export function Fact({ name, children }: { name: ReactNode; children: ReactNode }) {
   return (
     <div className="grid gap-x-4 py-2 sm:grid-cols-[minmax(8rem,1fr)_2fr]">
-      <dt className="type-label pt-0.5 text-muted">{name}</dt>
+      <dt className="pt-0.5 type-label text-muted">{name}</dt>
       <dd>{children}</dd>
     </div>
   );

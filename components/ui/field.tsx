@@ -26,7 +26,9 @@ export interface FieldIds {
 /** Ids that tie label, hint, reason and error to the input. */
 export function fieldIds({ name, id, hint, why, error }: FieldProps): FieldIds {
   const inputId = id ?? name;
-  const parts = [hint && `${inputId}-hint`, why && `${inputId}-why`, error && `${inputId}-error`].filter(Boolean);
+  const parts = [hint && `${inputId}-hint`, why && `${inputId}-why`, error && `${inputId}-error`].filter(
+    Boolean,
+  );
   return {
     inputId,
     describedBy: parts.length > 0 ? parts.join(" ") : undefined,
@@ -51,15 +53,7 @@ export function Field(props: FieldProps & { children: ReactNode }) {
   );
 }
 
-export function FieldNotes({
-  inputId,
-  hint,
-  why,
-}: {
-  inputId: string;
-  hint?: ReactNode;
-  why?: ReactNode;
-}) {
+export function FieldNotes({ inputId, hint, why }: { inputId: string; hint?: ReactNode; why?: ReactNode }) {
   return (
     <>
       {hint ? (
@@ -69,7 +63,7 @@ export function FieldNotes({
       ) : null}
       {why ? (
         <p id={`${inputId}-why`} className="border-l-2 border-line pl-2 text-sm text-muted">
-          <span className="type-label mr-1 text-text">Why</span>
+          <span className="mr-1 type-label text-text">Why</span>
           {why}
         </p>
       ) : null}

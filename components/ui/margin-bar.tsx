@@ -25,22 +25,32 @@ interface MarginBarProps {
  * it is hatched; the words carry the same.
  */
 export function MarginBar(props: MarginBarProps) {
-  const { label, value, limit, unit, digits, kind = "atMost", limitLabel = "limit", source, children } = props;
+  const {
+    label,
+    value,
+    limit,
+    unit,
+    digits,
+    kind = "atMost",
+    limitLabel = "limit",
+    source,
+    children,
+  } = props;
+  const words = (number: number | null) =>
+    number === null ? "not known" : formatQuantity(number, unit, { digits });
   const beyond = value !== null && limit !== null && (kind === "atMost" ? value > limit : value < limit);
   return (
     <figure className={cx("grid gap-1", props.className)}>
       <figcaption className="flex flex-wrap items-baseline justify-between gap-x-4">
         <span className="type-label">{label}</span>
-        <span className={cx("type-figure text-lg", beyond && "text-stop")}>
-          {value === null ? "not known" : formatQuantity(value, unit, { digits })}
-        </span>
+        <span className={cx("type-figure text-lg", beyond && "text-stop")}>{words(value)}</span>
       </figcaption>
-      <Bar value={value} limit={limit} kind={kind} beyond={beyond} />
+      <Bar value={value} limit={limit} fillTo={kind === "atMost" ? limit : null} beyond={beyond} />
       <p className="flex flex-wrap items-baseline justify-between gap-x-4 text-sm text-muted">
-        <span>{beyond ? (kind === "atMost" ? "over the limit" : "short of the limit") : null}</span>
+        <span>{beyond ? BEYOND[kind] : null}</span>
         <span className="inline-flex items-baseline gap-2">
           <span className="type-figure">
-            {limitLabel} {limit === null ? "not known" : formatQuantity(limit, unit, { digits })}
+            {limitLabel} {words(limit)}
           </span>
           {source ? <SourceMark source={source} /> : null}
         </span>
@@ -50,21 +60,20 @@ export function MarginBar(props: MarginBarProps) {
   );
 }
 
-function Bar({
-  value,
-  limit,
-  kind,
-  beyond,
-}: {
+const BEYOND = { atMost: "over the limit", atLeast: "short of the limit" } as const;
+
+interface BarProps {
   value: number | null;
   limit: number | null;
-  kind: "atMost" | "atLeast";
+  /** Where the solid part ends at the latest; the rest is hatched. */
+  fillTo: number | null;
   beyond: boolean;
-}) {
+}
+
+function Bar({ value, limit, fillTo, beyond }: BarProps) {
   const top = Math.max(value ?? 0, limit ?? 0) * 1.15 || 1;
-  const percent = (n: number) => `${Math.min(100, (100 * n) / top).toFixed(2)}%`;
-  const solid = value === null ? 0 : kind === "atMost" && limit !== null ? Math.min(value, limit) : value;
-  const over = value !== null && limit !== null ? value - limit : 0;
+  const percent = (n: number) => `${((100 * Math.max(0, n)) / top).toFixed(2)}%`;
+  const solid = Math.min(value ?? 0, fillTo ?? Infinity);
   return (
     <svg aria-hidden="true" className="block h-5 w-full overflow-visible" focusable="false">
       <rect
@@ -74,26 +83,42 @@ function Bar({
         className="fill-sunk stroke-line-strong"
         strokeDasharray={value === null ? "4 3" : undefined}
       />
-      <rect y="5" width={percent(solid)} height="10" className={beyond ? "fill-stop-fill" : "fill-calm-fill"} />
-      {kind === "atMost" && limit !== null && over > 0 ? (
-        <svg x={percent(limit)} y="5" width={percent(over)} height="10" className="overflow-hidden">
-          <rect width="100%" height="10" className="fill-stop-ground" />
-          {Array.from({ length: 60 }, (_, index) => (
-            <line
-              key={index}
-              x1={index * 8 - 10}
-              y1="10"
-              x2={index * 8}
-              y2="0"
-              className="stroke-stop-fill"
-              strokeWidth="2.5"
-            />
-          ))}
-        </svg>
-      ) : null}
+      <rect
+        y="5"
+        width={percent(solid)}
+        height="10"
+        className={beyond ? "fill-stop-fill" : "fill-calm-fill"}
+      />
+      {value !== null && value > solid ? <Hatched x={percent(solid)} width={percent(value - solid)} /> : null}
       {limit !== null ? (
-        <line x1={percent(limit)} x2={percent(limit)} y1="0" y2="20" className="stroke-text" strokeWidth="2.5" />
+        <line
+          x1={percent(limit)}
+          x2={percent(limit)}
+          y1="0"
+          y2="20"
+          className="stroke-text"
+          strokeWidth="2.5"
+        />
       ) : null}
+    </svg>
+  );
+}
+
+function Hatched({ x, width }: { x: string; width: string }) {
+  return (
+    <svg x={x} y="5" width={width} height="10" className="overflow-hidden">
+      <rect width="100%" height="10" className="fill-stop-ground" />
+      {Array.from({ length: 120 }, (_, index) => (
+        <line
+          key={index}
+          x1={index * 8 - 10}
+          y1="10"
+          x2={index * 8}
+          y2="0"
+          className="stroke-stop-fill"
+          strokeWidth="2.5"
+        />
+      ))}
     </svg>
   );
 }

@@ -51,7 +51,7 @@ export function NumberField({
         {unit ? (
           <span
             aria-hidden="true"
-            className="type-figure pointer-events-none absolute inset-y-0 right-3 flex items-center text-muted"
+            className="pointer-events-none absolute inset-y-0 right-3 flex items-center type-figure text-muted"
           >
             {unit}
           </span>

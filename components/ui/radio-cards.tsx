@@ -52,7 +52,7 @@ export function RadioCards(props: RadioCardsProps) {
           <label
             key={card.value}
             className={cx(
-              "touch relative flex cursor-pointer items-center gap-3 rounded-md border border-line-strong bg-raised px-3 py-2.5",
+              "relative flex touch cursor-pointer items-center gap-3 rounded-md border border-line-strong bg-raised px-3 py-2.5",
               "hover:border-text has-checked:border-action has-checked:bg-calm-ground has-checked:inset-ring-1 has-checked:inset-ring-action",
               "has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-focus",
               "has-disabled:cursor-not-allowed has-disabled:opacity-55",
@@ -64,7 +64,9 @@ export function RadioCards(props: RadioCardsProps) {
               value={card.value}
               disabled={card.disabled}
               required={required}
-              {...(controlled ? { checked: value === card.value } : { defaultChecked: defaultValue === card.value })}
+              {...(controlled
+                ? { checked: value === card.value }
+                : { defaultChecked: defaultValue === card.value })}
               onChange={onChange}
               className="size-5 shrink-0 cursor-pointer accent-action outline-none"
             />

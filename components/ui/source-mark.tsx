@@ -16,13 +16,21 @@ export function SourceMark({ source, className }: { source: NumberSource; classN
   return (
     <span
       title={meaning}
-      className={cx("type-label inline-flex items-center gap-1 whitespace-nowrap text-muted", className)}
+      className={cx("inline-flex items-center gap-1 type-label whitespace-nowrap text-muted", className)}
     >
       <svg viewBox="0 0 12 12" aria-hidden="true" className="size-3 shrink-0">
         {source === "tested" ? <rect x="1" y="1" width="10" height="10" fill="currentColor" /> : null}
         {source === "maker" ? (
           <>
-            <rect x="1.75" y="1.75" width="8.5" height="8.5" fill="none" stroke="currentColor" strokeWidth="1.5" />
+            <rect
+              x="1.75"
+              y="1.75"
+              width="8.5"
+              height="8.5"
+              fill="none"
+              stroke="currentColor"
+              strokeWidth="1.5"
+            />
             <rect x="4.25" y="4.25" width="3.5" height="3.5" fill="currentColor" />
           </>
         ) : null}

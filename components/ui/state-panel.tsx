@@ -97,7 +97,14 @@ function StatePanel({
   const Heading = `h${headingLevel}` as const;
   return (
     <div role={role} className={cx("grid justify-items-center gap-3 px-4 py-10 text-center", className)}>
-      <svg viewBox="0 0 72 52" aria-hidden="true" className="h-16 text-muted" fill="none" stroke="currentColor" strokeWidth="2">
+      <svg
+        viewBox="0 0 72 52"
+        aria-hidden="true"
+        className="h-16 text-muted"
+        fill="none"
+        stroke="currentColor"
+        strokeWidth="2"
+      >
         {drawing}
       </svg>
       <Heading>{title}</Heading>

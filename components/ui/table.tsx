@@ -18,7 +18,12 @@ export function Table({
   className?: string;
 }) {
   return (
-    <div role="region" aria-label={caption} tabIndex={0} className={cx("relative overflow-x-auto", className)}>
+    <div
+      role="region"
+      aria-label={caption}
+      tabIndex={0}
+      className={cx("relative overflow-x-auto", className)}
+    >
       <table className="w-full border-collapse border-y-2 border-frame text-left">
         <caption className={showCaption ? "pb-2 text-left font-semibold" : "sr-only"}>{caption}</caption>
         {children}
@@ -40,7 +45,9 @@ export function Th({ className, scope = "col", ...rest }: ComponentProps<"th">) 
     <th
       scope={scope}
       className={cx(
-        scope === "col" ? "type-label px-2 py-2 align-bottom text-muted" : "px-2 py-2.5 text-left align-top font-semibold",
+        scope === "col"
+          ? "px-2 py-2 align-bottom type-label text-muted"
+          : "px-2 py-2.5 text-left align-top font-semibold",
         className,
       )}
       {...rest}
@@ -52,7 +59,11 @@ export function Th({ className, scope = "col", ...rest }: ComponentProps<"th">) 
 export function Td({ className, numeric, ...rest }: ComponentProps<"td"> & { numeric?: boolean }) {
   return (
     <td
-      className={cx("px-2 py-2.5 align-top", numeric && "type-figure text-right whitespace-nowrap", className)}
+      className={cx(
+        "px-2 py-2.5 align-top",
+        numeric && "text-right type-figure whitespace-nowrap",
+        className,
+      )}
       {...rest}
     />
   );

@@ -9,7 +9,18 @@ type TextFieldProps = FieldProps &
   };
 
 /** One line of text. */
-export function TextField({ name, id, label, hint, why, error, optional, className, code, ...rest }: TextFieldProps) {
+export function TextField({
+  name,
+  id,
+  label,
+  hint,
+  why,
+  error,
+  optional,
+  className,
+  code,
+  ...rest
+}: TextFieldProps) {
   const field = { name, id, label, hint, why, error, optional, className };
   const { inputId, describedBy, invalid } = fieldIds(field);
   return (

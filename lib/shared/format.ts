@@ -14,15 +14,20 @@ export interface NumberStyle {
 }
 
 /** `-3.25` → `−3.25`; thousands in groups from 10 000 on (ISO 80000-1). Throws RangeError when not finite. */
-export function formatNumber(value: number, { digits, signed = false }: NumberStyle = {}): string {
+export function formatNumber(value: number, style: NumberStyle = {}): string {
   if (!Number.isFinite(value)) throw new RangeError("value must be a finite number");
-  const fixed = Math.abs(value).toFixed(digits ?? 2);
-  const plain = digits === undefined && fixed.includes(".") ? fixed.replace(/\.?0+$/, "") : fixed;
+  const fixed = Math.abs(value).toFixed(style.digits ?? 2);
+  const plain = style.digits === undefined ? fixed.replace(/\.?0+$/, "") : fixed;
   const [whole = "0", fraction] = plain.split(".");
   const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN_SPACE) : whole;
-  const isZero = Number(plain) === 0;
-  const sign = value < 0 && !isZero ? MINUS : signed && !isZero ? "+" : "";
-  return sign + grouped + (fraction === undefined ? "" : `.${fraction}`);
+  return sign(value, plain, style.signed) + grouped + (fraction === undefined ? "" : `.${fraction}`);
+}
+
+/** A value that rounds to zero has no sign. */
+function sign(value: number, rounded: string, signed = false): string {
+  if (Number(rounded) === 0) return "";
+  if (value < 0) return MINUS;
+  return signed ? "+" : "";
 }
 
 /** `12.4, "kN"` → `12.4 kN`; the degree sign of an angle stands close: `−3.2°`. */
@@ -67,16 +72,20 @@ const MONTHS = [
 
 /** `2019-05-04` as well as it is known: `4 May 2019`, `May 2019`, `2019`, `before 2005`. */
 export function formatPastDate(on: string, precision: PastDatePrecision = "day"): string {
-  const [year = "", month = "", day = ""] = on.slice(0, 10).split("-");
-  if (precision === "year") return year;
-  const monthName = MONTHS[Number(month) - 1];
-  // "before 2005" is kept as the first day of 2005; any other day is said in full.
-  if (precision === "before") {
-    const startsYear = monthName === undefined || (Number(month) === 1 && Number(day || 1) === 1);
-    return startsYear ? `before ${year}` : `before ${Number(day)} ${monthName} ${year}`;
+  const [year = "", month = "01", day = "01"] = on.slice(0, 10).split("-");
+  const monthYear = `${MONTHS[Number(month) - 1] ?? ""} ${year}`.trim();
+  const full = `${Number(day)} ${monthYear}`;
+  switch (precision) {
+    case "year":
+      return year;
+    case "month":
+      return monthYear;
+    case "day":
+      return full;
+    case "before":
+      // "before 2005" is kept as the first day of 2005; any other day is said in full.
+      return `before ${month === "01" && day === "01" ? year : full}`;
   }
-  if (monthName === undefined) return year;
-  return precision === "month" || day === "" ? `${monthName} ${year}` : `${Number(day)} ${monthName} ${year}`;
 }
 
 /** A UTC instant as the clock at the place shows it: `4 May 2019, 14:05`. */
@@ -90,7 +99,8 @@ export function formatInstant(at: string, timeZone: string): string {
     minute: "2-digit",
     hourCycle: "h23",
   }).formatToParts(new Date(at));
-  const part = (type: Intl.DateTimeFormatPartTypes) => parts.find((entry) => entry.type === type)?.value ?? "";
+  const part = (type: Intl.DateTimeFormatPartTypes) =>
+    parts.find((entry) => entry.type === type)?.value ?? "";
   const monthName = MONTHS[Number(part("month")) - 1] ?? "";
   return `${part("day")} ${monthName} ${part("year")}, ${part("hour")}:${part("minute")}`;
 }
