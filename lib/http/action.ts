@@ -10,22 +10,9 @@ import { now } from "@/lib/config/clock";
 import { log } from "@/lib/config/log";
 import { formValues } from "@/lib/http/form-values";
 import { parseOrRefuse } from "@/lib/http/parse";
+import type { FormAction } from "@/lib/shared/action-state";
 import type { Actor } from "@/lib/shared/actor";
-import { AppError, type ErrorCode, type FieldProblem } from "@/lib/shared/errors";
-
-/** What a form gets back. On a refusal `values` holds what was typed, so nothing is lost. */
-export type ActionState<R> =
-  | { state: "idle" }
-  | { state: "done"; result: R }
-  | {
-      state: "refused";
-      code: ErrorCode | "unexpected";
-      message: string;
-      problems: readonly FieldProblem[];
-      values: unknown;
-      /** The stored version when a stale save was refused. */
-      current?: Record<string, unknown>;
-    };
+import { AppError } from "@/lib/shared/errors";
 
 interface ActionInput<T> {
   actor: Actor;
@@ -48,7 +35,7 @@ export function action<S extends z.ZodType, R>(
   schema: S,
   handle: (input: ActionInput<z.output<S>>) => Promise<R>,
   { signedIn = true, limit = "write-person" }: ActionOptions = {},
-): (before: ActionState<R>, sent: unknown) => Promise<ActionState<R>> {
+): FormAction<R> {
   return async (_before, sent) => {
     const requestId = randomUUID();
     const values = sent instanceof FormData ? formValues(sent) : sent;
