@@ -6,6 +6,7 @@ export { metalAgainstClass, classOf, rank } from "./metal-class";
 export { metalAgainstStressCorrosion } from "./stress-corrosion";
 export type * from "./capacity";
 export { estimateRodEye } from "./rod-eye";
+export { stressAreaM2 } from "./stress-area";
 export { estimateStud } from "./stud";
 export { estimateBond } from "./bond";
 export { estimateRockCone } from "./rock-cone";

@@ -28,7 +28,14 @@ export function eyeRadius(e: BoltEvidence): Finding | null {
     );
   }
   const thicknessMm = e.bolt.rodDiameterMm ?? (e.bolt.eyeRadiusMm === null ? null : 2 * e.bolt.eyeRadiusMm);
-  if (!isHighline(e.use) || straight === false || thicknessMm === null) return null;
+  if (!isHighline(e.use) || straight === false) return null;
+  if (thicknessMm === null) {
+    const text = "How thick the eye is under textile is not on record.";
+    return {
+      ...finding("note", null, "Thickness of the eye not recorded", text, straight === null),
+      clearsWhen: "the thickness of the eye is recorded",
+    };
+  }
   if (!exceeds(NOTE_MM, thicknessMm)) return null;
   const level: Level = exceeds(LIMIT_MM, thicknessMm) ? "limit" : "note";
   const text = `Textile on the eye lies on ${mm(thicknessMm)}; ${mm(NOTE_MM)} treats it well, below ${mm(LIMIT_MM)} it cuts.`;
