@@ -21,7 +21,18 @@ const mayImport = {
   ],
   components: ["policy", "domain", "engineering", "schemas", "map", "offline", "shared"],
   http: ["auth", "policy", "schemas", "config", "shared"],
-  commands: ["db", "mail", "storage", "policy", "domain", "engineering", "schemas", "config", "shared"],
+  commands: [
+    "db",
+    "auth",
+    "mail",
+    "storage",
+    "policy",
+    "domain",
+    "engineering",
+    "schemas",
+    "config",
+    "shared",
+  ],
   queries: ["db", "policy", "domain", "engineering", "schemas", "config", "shared"],
   auth: ["db", "policy", "config", "shared"],
   mail: ["domain", "config", "shared"],
@@ -80,6 +91,24 @@ export default defineConfig([
       "no-restricted-properties": [
         "error",
         { object: "process", property: "env", message: "Read env through lib/config/env.ts." },
+      ],
+    },
+  },
+  {
+    // Commands are told who acts: of auth they take hashing and secrets, never a session.
+    files: ["lib/commands/**"],
+    rules: {
+      "no-restricted-imports": [
+        "error",
+        {
+          patterns: [
+            { group: ["drizzle-orm", "drizzle-orm/*", "postgres", "pg"], message: "SQL lives in db/." },
+            {
+              regex: "^@/lib/auth/(?!password$|secrets$)",
+              message: "A command gets its actor from the door.",
+            },
+          ],
+        },
       ],
     },
   },
