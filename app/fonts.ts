@@ -19,7 +19,8 @@ const textExtended = localFont({
   declarations: [
     {
       prop: "unicode-range",
-      value: "U+0100-02BA,U+02BD-02C5,U+02C7-02CC,U+02CE-02D7,U+02DD-02FF,U+0304,U+0308,U+1D00-1DBF,U+1E00-1EFF",
+      value:
+        "U+0100-02BA,U+02BD-02C5,U+02C7-02CC,U+02CE-02D7,U+02DD-02FF,U+0304,U+0308,U+1D00-1DBF,U+1E00-1EFF",
     },
   ],
 });
