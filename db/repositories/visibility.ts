@@ -1,7 +1,7 @@
 import "server-only";
 import { and, eq, inArray, isNull, ne, or, type SQL, sql } from "drizzle-orm";
 import { anchors, areas, sites } from "@/db/schema";
-import type { Audience } from "@/lib/policy/audience";
+import type { Audience } from "@/lib/shared/audience";
 
 /** The areas this audience may know of. */
 export function visibleAreas(who: Audience): SQL | undefined {

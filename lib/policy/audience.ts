@@ -1,18 +1,5 @@
 import type { Actor } from "@/lib/shared/actor";
-
-/**
- * Who is looking, reduced to what decides visibility. Lists and single reads narrow by it in SQL:
- * - an area or site with visibility `members` exists only for its members;
- * - a `sensitive` site shows outsiders its name and a rounded point, and nothing it could be found by.
- */
-export interface Audience {
-  /** Sees everything everywhere. */
-  everything: boolean;
-  /** Areas whose hidden and sensitive parts are visible. */
-  memberAreaIds: readonly string[];
-  /** Stable key for caches: the same key sees the same things. */
-  key: string;
-}
+import type { Audience } from "@/lib/shared/audience";
 
 export const PUBLIC_AUDIENCE: Audience = { everything: false, memberAreaIds: [], key: "public" };
 
