@@ -125,6 +125,11 @@ export async function listBoltRows(db: Handle, where: SQL) {
 
 export type BoltRow = Awaited<ReturnType<typeof listBoltRows>>[number];
 
+/** The bolts in force of one anchor. */
+export function boltsOfAnchor(anchorId: string): SQL {
+  return sql`${placements.anchorId} = ${anchorId} and ${bolts.removedOn} is null and ${bolts.struckAt} is null`;
+}
+
 /** Worst level first. */
 export function listFindingRows(db: Handle, anchorId: string) {
   return db

@@ -63,6 +63,10 @@ export async function policyOf(db: Handle, areaId: string): Promise<LoadPolicy> 
   return row ? { ...row.policy, version: row.versionNo } : DEFAULT_POLICY;
 }
 
+/** Of the site closed, or of the closed anchor's site; null: a whole area. */
+const siteVisibility = sql<string | null>`coalesce(${sites.visibility},
+  (select s.visibility from sites s where s.id = ${anchors.siteId}))`;
+
 /** Closures not lifted that touch the anchor, its site or its area; of a whole area when no anchor is named. */
 export function listClosureRows(
   db: Handle,
@@ -70,7 +74,13 @@ export function listClosureRows(
 ) {
   const { areaId, siteId, anchorId, withLifted } = scope;
   return db
-    .select({ closure: closures, siteName: sites.name, anchorCode: anchors.code, areaName: areas.name })
+    .select({
+      closure: closures,
+      siteName: sites.name,
+      siteVisibility,
+      anchorCode: anchors.code,
+      areaName: areas.name,
+    })
     .from(closures)
     .innerJoin(areas, eq(areas.id, closures.areaId))
     .leftJoin(sites, eq(sites.id, closures.siteId))
