@@ -1,7 +1,7 @@
 import "server-only";
-import { eq, sql } from "drizzle-orm";
+import { and, eq, isNull, sql } from "drizzle-orm";
 import type { Tx } from "@/db/client";
-import { users } from "@/db/schema";
+import { oneTimeTokens, users } from "@/db/schema";
 
 export async function insertUser(
   tx: Tx,
@@ -46,4 +46,20 @@ export async function updateUser(
 /** Lets only one transaction at a time make the first administrator. */
 export async function lockFirstRun(tx: Tx): Promise<void> {
   await tx.execute(sql`select pg_advisory_xact_lock(hashtext('first administrator'))`);
+}
+
+/** Makes every unspent sign-in and reset link of the person worthless. */
+export async function voidLinks(tx: Tx, userId: string, now: Date): Promise<void> {
+  await tx
+    .update(oneTimeTokens)
+    .set({ usedAt: now })
+    .where(and(eq(oneTimeTokens.userId, userId), isNull(oneTimeTokens.usedAt)));
+}
+
+/** Makes earlier first-run links worthless, so that only the one printed last works. */
+export async function voidFirstRunLinks(tx: Tx, now: Date): Promise<void> {
+  await tx
+    .update(oneTimeTokens)
+    .set({ usedAt: now })
+    .where(and(eq(oneTimeTokens.purpose, "first_run"), isNull(oneTimeTokens.usedAt)));
 }
