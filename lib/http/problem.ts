@@ -1,5 +1,5 @@
 import "server-only";
-import type { AppError} from "@/lib/shared/errors";
+import type { AppError } from "@/lib/shared/errors";
 import { type ErrorCode } from "@/lib/shared/errors";
 
 /** HTTP status of each way to refuse. */

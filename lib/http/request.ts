@@ -26,10 +26,15 @@ export function refuseForeignOrigin(request: Request): void {
   const site = request.headers.get("sec-fetch-site");
   const origin = request.headers.get("origin");
   const foreignSite = site !== null && site !== "same-origin" && site !== "none";
-  const foreignOrigin = origin !== null && new URL(origin).host !== request.headers.get("host");
+  const foreignOrigin = origin !== null && hostOf(origin) !== request.headers.get("host");
   if (foreignSite || foreignOrigin) {
     throw new AppError("forbidden", "This request came from another site's page.");
   }
+}
+
+/** The host an `Origin` names; null for "null", which sandboxed pages send, and for anything that is no origin. */
+function hostOf(origin: string): string | null {
+  return URL.canParse(origin) ? new URL(origin).host : null;
 }
 
 /** @throws MalformedRequest 400 when it is not JSON, 415 when it does not say so; AppError `too_large`. */
