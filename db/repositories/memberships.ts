@@ -19,7 +19,7 @@ export async function lockArea(tx: Tx, areaId: string) {
 export async function listAreaNames(db: Handle, ids: readonly string[] | null) {
   if (ids?.length === 0) return [];
   return db
-    .select({ id: areas.id, slug: areas.slug, name: areas.name })
+    .select({ id: areas.id, name: areas.name })
     .from(areas)
     .where(ids === null ? undefined : inArray(areas.id, [...ids]))
     .orderBy(asc(areas.name));
@@ -33,7 +33,6 @@ export async function listMembers(db: Handle, areaId: string) {
       email: users.email,
       role: memberships.role,
       version: memberships.version,
-      since: memberships.createdAt,
     })
     .from(memberships)
     .innerJoin(users, eq(users.id, memberships.userId))

@@ -1,7 +1,7 @@
 import "server-only";
-import { and, asc, desc, eq, inArray, lte, sql } from "drizzle-orm";
+import { and, asc, eq, lte, sql } from "drizzle-orm";
 import { v7 } from "uuid";
-import type { Handle, Tx } from "@/db/client";
+import type { Tx } from "@/db/client";
 import { outbox } from "@/db/schema";
 
 export type OutboxRow = typeof outbox.$inferSelect;
@@ -67,28 +67,4 @@ export async function markFailed(
       ...(nextAttemptAt ? { nextAttemptAt } : { state: "given_up" }),
     })
     .where(eq(outbox.id, id));
-}
-
-/** Mails given up on, newest first. `areaIds` null: all, those of no area too (administrators). */
-export async function listGivenUpMails(db: Handle, areaIds: readonly string[] | null): Promise<OutboxRow[]> {
-  if (areaIds?.length === 0) return [];
-  return db
-    .select()
-    .from(outbox)
-    .where(
-      and(eq(outbox.state, "given_up"), areaIds === null ? undefined : inArray(outbox.areaId, [...areaIds])),
-    )
-    .orderBy(desc(outbox.createdAt))
-    .limit(200);
-}
-
-/** How long the oldest due mail has waited, for the health check; null: none is due. */
-export async function oldestDueMailAt(db: Handle, now: Date): Promise<Date | null> {
-  const [row] = await db
-    .select({ at: outbox.nextAttemptAt })
-    .from(outbox)
-    .where(and(eq(outbox.state, "queued"), lte(outbox.nextAttemptAt, now)))
-    .orderBy(asc(outbox.nextAttemptAt))
-    .limit(1);
-  return row?.at ?? null;
 }
