@@ -13,6 +13,10 @@ import { enterLowdenQuarry } from "@/db/seed/sites/lowden-quarry";
 import { enterOuterSkerry } from "@/db/seed/sites/outer-skerry";
 import { enterPillarStack } from "@/db/seed/sites/pillar-stack";
 import { enterUndercroft } from "@/db/seed/sites/undercroft";
+import { enterHistory } from "@/db/seed/stories/history";
+import { enterNotices } from "@/db/seed/stories/notices";
+import { enterQueue } from "@/db/seed/stories/queue";
+import { enterReports } from "@/db/seed/stories/reports";
 import { enterSpans } from "@/db/seed/stories/spans";
 import { writeBook } from "@/db/seed/write";
 
@@ -32,6 +36,10 @@ export async function seedTarrow(db: Db, now: Date): Promise<void> {
   enterCrownMoor(book, ground.crownMoor, island);
   enterOuterSkerry(book, ground.outerSkerry, island);
   enterSpans(book, ground);
+  enterReports(book);
+  enterQueue(book);
+  enterNotices(book, ground);
+  enterHistory(book);
 
   const people = await demoUsers(book.people);
   await inTransaction(db, async (tx) => {

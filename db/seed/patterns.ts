@@ -99,6 +99,7 @@ export function lineEnd(what: {
   placements: readonly PlacementSpec[];
   note?: string;
   bodies?: AnchorSpec["bodies"];
+  edge?: Edge;
   more?: Partial<AnchorSpec>;
 }): AnchorSpec {
   const [xMm, yMm, zMm] = what.masterpoint;
@@ -114,6 +115,7 @@ export function lineEnd(what: {
     at: what.at,
     placements: what.placements,
     bodies: what.bodies,
+    edges: what.edge === undefined ? [] : [what.edge],
     ...what.more,
     facts: {
       elevationM: what.elevationM,
@@ -129,6 +131,19 @@ export function lineEnd(what: {
       ...what.more?.facts,
     },
   };
+}
+
+type Edge = NonNullable<AnchorSpec["edges"]>[number];
+
+/** A rock edge the line would lie on, from one point of the face to another, mm; padding is needed. */
+export function lip(
+  label: string,
+  sharpness: Edge["sharpness"],
+  secured: string | null,
+  [x1Mm, y1Mm]: readonly [number, number],
+  [x2Mm, y2Mm]: readonly [number, number],
+): Edge {
+  return { label, sharpness, paddingNeeded: true, secured, x1Mm, y1Mm, x2Mm, y2Mm };
 }
 
 /** The other end of a line: so far along a bearing, checked by the database afterwards. */

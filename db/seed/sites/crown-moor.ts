@@ -5,7 +5,7 @@ import type { Site } from "@/db/seed/ground";
 import { installed, type InstallOptions, removed } from "@/db/seed/hardware";
 import { azimuthDeg, walk } from "@/db/seed/island/frame";
 import type { Places } from "@/db/seed/island/places";
-import { acrossM, lineEnd, pair, row, type Wall } from "@/db/seed/patterns";
+import { acrossM, lineEnd, lip, pair, row, type Wall } from "@/db/seed/patterns";
 import { Random } from "@/db/seed/random";
 import type { AnchorSpec, BoltSpec, PlacementSpec } from "@/db/seed/spec";
 
@@ -56,20 +56,13 @@ function longMoor(book: Book, site: Site, random: Random, west: End, east: End):
         { at: [1_070, 30, 0], bolts: [rod()] },
         { at: [520, 1_900, 60], facts: { role: "backup" }, bolts: [rod()] },
       ],
-      more: {
-        edges: [
-          {
-            label: "Peat-covered lip",
-            sharpness: "rounded",
-            paddingNeeded: true,
-            secured: "Rubber mat on a cord to the sheepfold",
-            x1Mm: -500,
-            y1Mm: -2_500,
-            x2Mm: 1_700,
-            y2Mm: -2_450,
-          },
-        ],
-      },
+      edge: lip(
+        "Peat-covered lip",
+        "rounded",
+        "Rubber mat on a cord to the sheepfold",
+        [-500, -2_500],
+        [1_700, -2_450],
+      ),
     }),
   );
   const placements: PlacementSpec[] = [
@@ -90,20 +83,13 @@ function longMoor(book: Book, site: Site, random: Random, west: End, east: End):
       masterpoint: [745, -1_900, 190],
       backupSlackM: 0.8,
       placements,
-      more: {
-        edges: [
-          {
-            label: "Clean-cut edge",
-            sharpness: "sharp",
-            paddingNeeded: true,
-            secured: "Angle iron lined with carpet, tied back",
-            x1Mm: -300,
-            y1Mm: -2_800,
-            x2Mm: 1_900,
-            y2Mm: -2_820,
-          },
-        ],
-      },
+      edge: lip(
+        "Clean-cut edge",
+        "sharp",
+        "Angle iron lined with carpet, tied back",
+        [-300, -2_800],
+        [1_900, -2_820],
+      ),
     }),
   );
 }
@@ -227,6 +213,7 @@ function around(book: Book, site: Site, random: Random, { west, east, little }: 
   at("East rim safety", ["belay"], [east, -6, 69], two("eye12in4462", book.calendar.ago(900)));
   at("East rim abseil", ["abseil"], [east, 6, 66], two("studM12in4404", onDay("2016-08-20")));
   at("Little Moor safety", ["belay"], [little, -5, 52], two("studM12in4404", onDay("2018-07-14")));
+  at("Little Moor abseil", ["abseil"], [little, 9, 49], two("eye12in4404", book.calendar.ago(1_190)));
   at("Tag line post, west", ["directional"], [west, -4, 63], single("eye12in4404", book.calendar.ago(900)));
   at("Tag line post, east", ["directional"], [east, -4, 68], single("eye12in4404", book.calendar.ago(900)));
   at("Sheepfold stream abseil", ["abseil"], [west, 60, 31], single("studM10in4404", onDay("2015-07-18")));

@@ -144,6 +144,7 @@ function enterLedges(book: Book, site: Site, random: Random, wall: Wall): void {
   stance("Raven stance", 79, 47, two("studM12in4404", onDay("2017-06-03")));
   stance("Crystal stance", 86, 26, two("eye12in4404", book.calendar.ago(720)));
   stance("Eyrie", 87, 51, two("eye12in4404", book.calendar.ago(720)));
+  stance("Wether stance", 4, 22, two("eye12in4404", book.calendar.ago(470)));
   stance("Saddle stance", 93, 22, two("studM12in4462", book.calendar.ago(1_430)));
   stance("Cold stance", 95, 45, [
     [
@@ -188,6 +189,7 @@ function enterLedges(book: Book, site: Site, random: Random, wall: Wall): void {
   ]);
   const abseil = (label: string, upM: number, type: TypeKey, when: Past) =>
     book.anchor(site, pair(wall, { label, uses: ["abseil"], rightM: 108, upM, bolts: two(type, when) }));
+  abseil("Dry gully abseil", 30, "gluedM12in4404", onDay("2018-09-22"));
   abseil("Abseil piste, upper", 58, "eye12in4404", book.calendar.ago(1_300));
   abseil("Abseil piste, middle", 38, "eye12in4404", book.calendar.ago(1_300));
   abseil("Abseil piste, lower", 18, "studM12in4404", onDay("2014-10-11"));

@@ -1,10 +1,12 @@
+import type { LonLat } from "@/db/columns/point";
 import type { Book } from "@/db/seed/book";
 import { inMonth, onDay } from "@/db/seed/dates";
 import type { Site } from "@/db/seed/ground";
 import { installed, removed } from "@/db/seed/hardware";
+import { enterCleftWays } from "@/db/seed/sites/gannet-cleft-ways";
 import { azimuthDeg, walk } from "@/db/seed/island/frame";
 import type { Places } from "@/db/seed/island/places";
-import { acrossM, lineEnd, pair, type Wall } from "@/db/seed/patterns";
+import { acrossM, lineEnd, lip } from "@/db/seed/patterns";
 import { Random } from "@/db/seed/random";
 import type { BoltSpec } from "@/db/seed/spec";
 
@@ -26,7 +28,8 @@ export function enterGannetCleft(book: Book, site: Site, { gannetCleft }: Places
   mouth(book, site, random, ends(MOUTH));
   waist(book, site, random, ends(WAIST));
   throat(book, site, random, ends(THROAT));
-  wayDown(book, site, random, {
+  const ledge = walk(at, [inlandDeg, 66], [inlandDeg + 270, 30]);
+  enterCleftWays(book, site, random, ledge, {
     foot: ends(WAIST).north,
     facingDeg: ends(WAIST).toSouthDeg,
     dipDeg: 84,
@@ -35,8 +38,8 @@ export function enterGannetCleft(book: Book, site: Site, { gannetCleft }: Places
 }
 
 interface Ends {
-  north: { lon: number; lat: number };
-  south: { lon: number; lat: number };
+  north: LonLat;
+  south: LonLat;
   toSouthDeg: number;
   toNorthDeg: number;
 }
@@ -71,20 +74,13 @@ function mouth(book: Book, site: Site, random: Random, { north, south, toSouthDe
         { at: [330, 1_480, 60], facts: { role: "backup" }, bolts: [eye()] },
         { at: [980, 1_560, 85], facts: { role: "backup" }, bolts: [eye()] },
       ],
-      more: {
-        edges: [
-          {
-            label: "Lip of the slab",
-            sharpness: "sharp",
-            paddingNeeded: true,
-            secured: "Carpet and board, tied back to bolt 4",
-            x1Mm: -500,
-            y1Mm: -2_900,
-            x2Mm: 1_900,
-            y2Mm: -2_780,
-          },
-        ],
-      },
+      edge: lip(
+        "Lip of the slab",
+        "sharp",
+        "Carpet and board, tied back to bolt 4",
+        [-500, -2_900],
+        [1_900, -2_780],
+      ),
     }),
   );
   book.anchor(
@@ -112,20 +108,7 @@ function mouth(book: Book, site: Site, random: Random, { north, south, toSouthDe
           },
         },
       ],
-      more: {
-        edges: [
-          {
-            label: "Rounded nose",
-            sharpness: "rounded",
-            paddingNeeded: true,
-            secured: "Fire hose sleeve on the line",
-            x1Mm: -300,
-            y1Mm: -2_400,
-            x2Mm: 1_500,
-            y2Mm: -2_450,
-          },
-        ],
-      },
+      edge: lip("Rounded nose", "rounded", "Fire hose sleeve on the line", [-300, -2_400], [1_500, -2_450]),
     }),
   );
 }
@@ -156,20 +139,7 @@ function waist(book: Book, site: Site, random: Random, { north, south, toSouthDe
         { at: [1_120, -20, 0], bolts: [eye()] },
         { at: [560, 1_250, 30], facts: { role: "backup" }, bolts: [eye()] },
       ],
-      more: {
-        edges: [
-          {
-            label: "Broken edge",
-            sharpness: "sharp",
-            paddingNeeded: true,
-            secured: "Two boards, screwed to each other",
-            x1Mm: -200,
-            y1Mm: -2_050,
-            x2Mm: 1_350,
-            y2Mm: -2_150,
-          },
-        ],
-      },
+      edge: lip("Broken edge", "sharp", "Two boards, screwed to each other", [-200, -2_050], [1_350, -2_150]),
     }),
   );
   book.anchor(
@@ -242,82 +212,4 @@ function throat(
       ],
     }),
   );
-}
-
-/** Abseils, belays at the edge and the directionals that keep ropes off the nose. */
-function wayDown(book: Book, site: Site, random: Random, wall: Wall): void {
-  const near = book.calendar.ago(800);
-  const two = (make: () => BoltSpec) => [[make()], [make()]];
-  const steel = () => installed(random, "eye12in4404", onDay("2017-08-26"));
-  const titanium = () => installed(random, "eye10inTitanium", near);
-  book.anchor(
-    site,
-    pair(wall, {
-      label: "Abseil to the kelp ledge",
-      uses: ["abseil"],
-      rightM: -14,
-      upM: 42,
-      bolts: two(titanium),
-      more: {
-        fittings: [
-          {
-            kind: "ring",
-            metal: "ti-2",
-            diameterMm: 12,
-            diameterLeftMm: 11.8,
-            installedOn: near.on,
-            replaceable: true,
-            on: 1,
-          },
-          {
-            kind: "ring",
-            metal: "ti-2",
-            diameterMm: 12,
-            diameterLeftMm: 11.8,
-            installedOn: near.on,
-            replaceable: true,
-            on: 2,
-          },
-        ],
-      },
-    }),
-  );
-  book.anchor(
-    site,
-    pair(wall, { label: "Kelp ledge belay", uses: ["belay"], rightM: -13, upM: 12, bolts: two(titanium) }),
-  );
-  book.anchor(
-    site,
-    pair(wall, { label: "North rim safety", uses: ["belay"], rightM: 9, upM: 45, bolts: two(steel) }),
-  );
-  book.anchor(
-    site,
-    pair(wall, {
-      label: "South rim safety",
-      uses: ["belay"],
-      rightM: 24,
-      upM: 44,
-      bolts: two(() => installed(random, "gluedM10in4529", book.calendar.ago(640))),
-    }),
-  );
-  book.anchor(
-    site,
-    pair(wall, {
-      label: "Nose directional",
-      uses: ["directional"],
-      rightM: 16,
-      upM: 41,
-      bolts: [[titanium()]],
-    }),
-  );
-  book.anchor(site, {
-    label: "Rim blocks, tag line",
-    uses: ["directional"],
-    at: walk(wall.foot, [wall.facingDeg + 180, 12]),
-    facts: { elevationM: 49, note: "For the tag line only; nobody ties in here." },
-    placements: [
-      { facts: { kind: "boulder", sizeMm: 1_900, note: "Sits on turf; look under it before use." } },
-      { facts: { kind: "removable", note: "Crack for two cams, 40 to 65 mm." } },
-    ],
-  });
 }

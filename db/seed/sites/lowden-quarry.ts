@@ -141,6 +141,7 @@ function enterTramway(book: Book, site: Site, random: Random, wall: Wall): void 
     46,
     two("eye12in4462", book.calendar.ago(330), { by: "steward" }),
   );
+  at("Kiln top belay", ["belay"], -8, two("eye12in4404", book.calendar.ago(610)));
   at("Winch house redirect", ["directional"], 44, [
     [installed(random, "eye12in4404", book.calendar.ago(330))],
   ]);

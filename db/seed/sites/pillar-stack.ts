@@ -4,7 +4,7 @@ import type { Site } from "@/db/seed/ground";
 import { found, installed, removed } from "@/db/seed/hardware";
 import { azimuthDeg, walk } from "@/db/seed/island/frame";
 import { type Places, RIM_ANCHOR_INLAND_M, STACK_SPAN_M } from "@/db/seed/island/places";
-import { acrossM, lineEnd, pair, row, type Wall } from "@/db/seed/patterns";
+import { acrossM, lineEnd, lip, pair, row, type Wall } from "@/db/seed/patterns";
 import { Random } from "@/db/seed/random";
 
 /** One line from the rim to the stack, and everything needed to get off the stack again. */
@@ -15,6 +15,12 @@ export function enterPillarStack(book: Book, site: Site, { pillarStack }: Places
   const stack = acrossM(rim, seawardDeg, STACK_SPAN_M);
   rimEnd(book, site, random, rim, azimuthDeg(rim, stack));
   stackEnd(book, site, random, stack, azimuthDeg(stack, rim));
+  onTheRim(book, site, random, {
+    foot: walk(rim, [pillarStack.inlandDeg, 5]),
+    facingDeg: seawardDeg,
+    dipDeg: 20,
+    groundM: 39,
+  });
   offTheStack(book, site, random, {
     foot: walk(pillarStack.stackCentre, [seawardDeg + 180, 15]),
     facingDeg: seawardDeg + 180,
@@ -48,20 +54,13 @@ function rimEnd(
         { at: [1_420, 10, 0], bolts: [eye()] },
         { at: [700, 1_700, 40], facts: { role: "backup" }, bolts: [eye()] },
       ],
-      more: {
-        edges: [
-          {
-            label: "Sandstone rim",
-            sharpness: "rounded",
-            paddingNeeded: true,
-            secured: "Carpet, weighted at both ends: the rim crumbles under pegs",
-            x1Mm: -600,
-            y1Mm: -3_100,
-            x2Mm: 2_000,
-            y2Mm: -3_000,
-          },
-        ],
-      },
+      edge: lip(
+        "Sandstone rim",
+        "rounded",
+        "Carpet, weighted at both ends: the rim crumbles under pegs",
+        [-600, -3_100],
+        [2_000, -3_000],
+      ),
     }),
   );
 }
@@ -114,20 +113,7 @@ function stackEnd(
           note: "Some seven tonnes, sits in a hollow; did not move when levered.",
         },
       ],
-      more: {
-        edges: [
-          {
-            label: "Summit edge",
-            sharpness: "rounded",
-            paddingNeeded: true,
-            secured: null,
-            x1Mm: -400,
-            y1Mm: -2_300,
-            x2Mm: 1_500,
-            y2Mm: -2_350,
-          },
-        ],
-      },
+      edge: lip("Summit edge", "rounded", null, [-400, -2_300], [1_500, -2_350]),
     }),
   );
 }
@@ -194,14 +180,17 @@ function offTheStack(book: Book, site: Site, random: Random, wall: Wall): void {
       ),
     }),
   );
+}
+
+/** On the mainland side: what the crew ties into, and the point the bags go across from. */
+function onTheRim(book: Book, site: Site, random: Random, wall: Wall): void {
+  const eye = () => installed(random, "eye12in4529", book.calendar.ago(860));
   book.anchor(
     site,
-    pair(wall, {
-      label: "Rim haul point",
-      uses: ["directional"],
-      rightM: 40,
-      upM: 34,
-      bolts: [[installed(random, "eye12in4529", book.calendar.ago(860))]],
-    }),
+    pair(wall, { label: "Rim safety", uses: ["belay"], rightM: -5, upM: 1, bolts: [[eye()], [eye()]] }),
+  );
+  book.anchor(
+    site,
+    pair(wall, { label: "Rim haul point", uses: ["directional"], rightM: 6, upM: 1, bolts: [[eye()]] }),
   );
 }

@@ -107,4 +107,15 @@ export function enterUndercroft(book: Book, site: Site, { undercroft }: Places):
       more: { facts: TAPED },
     }),
   );
+  book.anchor(
+    site,
+    pair(wall, {
+      label: "Low water handline",
+      uses: ["abseil"],
+      rightM: -28,
+      upM: 3,
+      bolts: [[titanium()], [titanium()]],
+      more: { facts: TAPED },
+    }),
+  );
 }
