@@ -1,0 +1,3 @@
+import { route } from "@/lib/http/route";
+
+export const GET = route({ anybody: true }, () => Promise.resolve({ body: { status: "up" } }));
