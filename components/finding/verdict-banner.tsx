@@ -1,7 +1,8 @@
 import type { ReactNode } from "react";
 import { MarkShape } from "@/components/finding/condition-mark";
 import { cx } from "@/components/ui/cx";
-import { CAUTION, VERDICT_LABELS } from "@/lib/domain/labels";
+import { CAUTION } from "@/lib/domain/finding/engine";
+import { VERDICT_LABELS } from "@/lib/domain/labels";
 import type { Verdict } from "@/lib/domain/vocabulary";
 import { VERDICT_MARKS } from "@/lib/map/marks";
 

@@ -1,5 +1,5 @@
 import Link from "next/link";
-import { CAUTION } from "@/lib/domain/labels";
+import { CAUTION } from "@/lib/domain/finding/engine";
 
 /** Last line of every page, on screen and on paper. */
 export function SiteFooter() {

@@ -282,7 +282,3 @@ export function usesLabel(uses: readonly Use[]): string {
 export function sentence(words: string): string {
   return words.charAt(0).toUpperCase() + words.slice(1);
 }
-
-/** Stands wherever a verdict is shown. */
-export const CAUTION =
-  "Byssus informs competent people; it does not certify an anchor. The hardware maker's instructions, local land and access rules, local codes and qualified practice come first.";
