@@ -1,6 +1,6 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { type Db } from "@/db/client";
+import type { Db } from "@/db/client";
 
 /** How many migrations the database has seen. @throws when the database does not answer. */
 export async function appliedMigrations(db: Db): Promise<number> {
@@ -8,4 +8,12 @@ export async function appliedMigrations(db: Db): Promise<number> {
     sql`select count(*)::int as n from drizzle.__drizzle_migrations`,
   );
   return row?.n ?? 0;
+}
+
+/** Whether nobody and nothing is registered yet. */
+export async function isEmptyRegister(db: Db): Promise<boolean> {
+  const [row] = await db.execute<{ empty: boolean }>(
+    sql`select not exists (select 1 from users) and not exists (select 1 from areas) as empty`,
+  );
+  return row?.empty ?? true;
 }
