@@ -2,6 +2,7 @@ import { coatingLifeYears, corrosionDepthM, remainingRod } from "@/lib/engineeri
 import { yearsBetween } from "@/lib/domain/finding/dates";
 import type { BoltEvidence, BoltFacts } from "@/lib/domain/finding/evidence";
 import { isMechanical } from "@/lib/domain/finding/traits";
+import { isSome } from "@/lib/domain/finding/words";
 
 /** How zinc and then steel are used up: ISO 9223 rates at their upper end, ISO 9224 growth. */
 
@@ -33,7 +34,7 @@ export function coatingUm(bolt: BoltFacts, metal: string): number {
 export function diametersMm(bolt: BoltFacts): readonly number[] {
   const known =
     bolt.shankDiameterMm ?? bolt.rodDiameterMm ?? (isMechanical(bolt) ? bolt.holeDiameterMm : null);
-  return known === null || known <= 0 ? PLAUSIBLE_SHANK_MM : [known];
+  return isSome(known) ? [known] : PLAUSIBLE_SHANK_MM;
 }
 
 /** The ages the bolt may have on the date asked for, years: one when the date is known, least age first. */
@@ -45,7 +46,7 @@ export function ages(e: BoltEvidence): readonly number[] {
 
 /** Zinc life in years: the shorter of the power law and the straight line. */
 function zincYears(thicknessUm: number, seaM: number): number {
-  if (thicknessUm <= 0) return 0;
+  if (!isSome(thicknessUm)) return 0;
   const firstYearUm = categoryAt(seaM).zincUm;
   return Math.min(
     coatingLifeYears({

@@ -1,6 +1,7 @@
 import { estimateRodEye } from "@/lib/engineering";
 import { familyOf, metalName, strengthOf } from "@/lib/domain/catalogue/metals";
 import type { BoltFacts } from "@/lib/domain/finding/evidence";
+import { isSome } from "@/lib/domain/finding/words";
 
 /** Breaking strength as rated, kN; a part of null is not known. */
 export interface Rated {
@@ -96,9 +97,8 @@ function axialOnset(bolt: BoltFacts): { axialKn: number | null; assumed: readonl
 function estimateBentRod(bolt: BoltFacts): Omit<BendOnset, "axialKn" | "origin"> | null {
   const strength = strengthOf(bolt.metal);
   const { rodDiameterMm, leverMm } = bolt;
-  if (bolt.form !== "glued_bent_rod" || strength === null || rodDiameterMm === null || leverMm === null)
-    return null;
-  if ((bolt.rodCount ?? 2) !== 2 || rodDiameterMm <= 0) return null;
+  if (bolt.form !== "glued_bent_rod" || (bolt.rodCount ?? 2) !== 2) return null;
+  if (strength === null || !isSome(rodDiameterMm) || leverMm === null) return null;
 
   const isTitanium = familyOf(bolt.metal) === "titanium";
   const highYieldMpa = isTitanium ? strength.yieldMpa : Math.max(COLD_BENT_MPA, strength.yieldMpa);

@@ -1,10 +1,12 @@
 import type { PlaceClass } from "@/lib/engineering";
 import type { LoadPolicy } from "@/lib/domain/policy";
 import type { Use, Verdict } from "@/lib/domain/vocabulary";
-import { CAUTION } from "@/lib/domain/finding/engine";
-import { evaluateBolt } from "@/lib/domain/finding/evaluate-bolt";
+import { boltFindings } from "@/lib/domain/finding/bolt-findings";
+import { CAUTION, ENGINE_VERSION } from "@/lib/domain/finding/engine";
 import type { BoltEvidence, BoltFacts, Demand, PlaceFacts } from "@/lib/domain/finding/evidence";
+import { placeClassOf } from "@/lib/domain/finding/place";
 import type { Finding } from "@/lib/domain/finding/types";
+import { verdictOf } from "@/lib/domain/finding/verdict-of";
 
 /** What a what-if takes of a bolt; everything but the form may be missing or null. */
 export type WhatIfBolt = Pick<BoltFacts, "form"> & {
@@ -33,8 +35,15 @@ export interface WhatIfAnswer {
 
 /** Judges a bolt in the strict context: one bolt carries all, and failing that is a stop. */
 export function whatIf(input: WhatIfInput, policy: LoadPolicy): WhatIfAnswer {
-  const { verdict, engine, placeClass, findings } = evaluateBolt(evidenceOf(input, policy), policy);
-  return { verdict, engine, placeClass, findings, caution: CAUTION };
+  const evidence = evidenceOf(input, policy);
+  const findings = boltFindings(evidence, policy);
+  return {
+    verdict: verdictOf(findings),
+    engine: ENGINE_VERSION,
+    placeClass: placeClassOf(evidence.place),
+    findings,
+    caution: CAUTION,
+  };
 }
 
 /** The evidence behind a what-if, for callers who want more than the answer. */
@@ -45,15 +54,15 @@ export function evidenceOf(input: WhatIfInput, policy: LoadPolicy): BoltEvidence
     use: input.use,
     bolt: boltOf(input.bolt),
     place: {
-      seaDistanceM: place?.seaDistanceM ?? null,
-      seaDistanceErrorM: place?.seaDistanceErrorM ?? 0,
+      seaDistanceM: size(place?.seaDistanceM),
+      seaDistanceErrorM: size(place?.seaDistanceErrorM) ?? 0,
       coast: place?.coast ?? "other",
       washing: place?.washing ?? null,
       so2: place?.so2 ?? null,
-      saltedRoadDistanceM: place?.saltedRoadDistanceM ?? null,
+      saltedRoadDistanceM: size(place?.saltedRoadDistanceM),
       warmDry: place?.warmDry ?? false,
     },
-    rock: { ucsMpa: input.rock?.ucsMpa ?? null },
+    rock: { ucsMpa: size(input.rock?.ucsMpa) },
     demand: demandOf(input, policy),
     onDate: input.onDate,
     placement: null,
@@ -63,6 +72,14 @@ export function evidenceOf(input: WhatIfInput, policy: LoadPolicy): BoltEvidence
   };
 }
 
+/** Beyond this no length, force or distance of this world lies; formulas stay finite below it. */
+const GREATEST = 1e9;
+
+/** A number, or null for one that is missing. */
+function size(value: number | null | undefined): number | null {
+  return value === null || value === undefined ? null : Math.min(value, GREATEST);
+}
+
 /** Missing and null both mean "not known". */
 function boltOf(bolt: WhatIfBolt): BoltFacts {
   return {
@@ -70,31 +87,31 @@ function boltOf(bolt: WhatIfBolt): BoltFacts {
     metal: bolt.metal ?? null,
     hangerMetal: bolt.hangerMetal ?? null,
     linkMetal: bolt.linkMetal ?? null,
-    rodCount: bolt.rodCount ?? null,
-    rodDiameterMm: bolt.rodDiameterMm ?? null,
-    leverMm: bolt.leverMm ?? null,
-    shankDiameterMm: bolt.shankDiameterMm ?? null,
-    ratedRadialKn: bolt.ratedRadialKn ?? null,
-    ratedAxialKn: bolt.ratedAxialKn ?? null,
-    bendOnsetKn: bolt.bendOnsetKn ?? null,
-    bendOnsetHighKn: bolt.bendOnsetHighKn ?? null,
-    bendOnsetAxialKn: bolt.bendOnsetAxialKn ?? null,
+    rodCount: size(bolt.rodCount),
+    rodDiameterMm: size(bolt.rodDiameterMm),
+    leverMm: size(bolt.leverMm),
+    shankDiameterMm: size(bolt.shankDiameterMm),
+    ratedRadialKn: size(bolt.ratedRadialKn),
+    ratedAxialKn: size(bolt.ratedAxialKn),
+    bendOnsetKn: size(bolt.bendOnsetKn),
+    bendOnsetHighKn: size(bolt.bendOnsetHighKn),
+    bendOnsetAxialKn: size(bolt.bendOnsetAxialKn),
     method: bolt.method ?? null,
-    embedmentMm: bolt.embedmentMm ?? null,
-    holeDiameterMm: bolt.holeDiameterMm ?? null,
-    eyeRadiusMm: bolt.eyeRadiusMm ?? null,
-    coatingThicknessUm: bolt.coatingThicknessUm ?? null,
+    embedmentMm: size(bolt.embedmentMm),
+    holeDiameterMm: size(bolt.holeDiameterMm),
+    eyeRadiusMm: size(bolt.eyeRadiusMm),
+    coatingThicknessUm: size(bolt.coatingThicknessUm),
     installedOn: bolt.installedOn ?? null,
     standard: bolt.standard ?? null,
     batch: bolt.batch ?? null,
     adhesiveId: bolt.adhesiveId ?? null,
     adhesiveBatch: bolt.adhesiveBatch ?? null,
-    bondMpa: bolt.bondMpa ?? null,
+    bondMpa: size(bolt.bondMpa),
     adhesiveExpiresOn: bolt.adhesiveExpiresOn ?? null,
     usableFrom: bolt.usableFrom ?? null,
     recheckDueOn: bolt.recheckDueOn ?? null,
     magnetic: bolt.magnetic ?? null,
-    rustGrade: bolt.rustGrade ?? null,
+    rustGrade: size(bolt.rustGrade),
     bendOnsetBasis: bolt.bendOnsetBasis ?? "unknown",
     installedOnPrecision: bolt.installedOnPrecision ?? "day",
   };
@@ -104,8 +121,8 @@ function demandOf({ demand, use }: WhatIfInput, policy: LoadPolicy): Demand {
   const agreed = policy.demand[use];
   const typed = typeof demand?.workingKn === "number" || typeof demand?.peakKn === "number";
   return {
-    workingKn: demand?.workingKn ?? agreed.workingKn,
-    peakKn: demand?.peakKn ?? agreed.peakKn,
+    workingKn: size(demand?.workingKn) ?? agreed.workingKn,
+    peakKn: size(demand?.peakKn) ?? agreed.peakKn,
     angleFromAxisDeg: demand?.angleFromAxisDeg ?? 90,
     origin: typed ? "typed" : `area policy, version ${policy.version}`,
   };

@@ -8,13 +8,21 @@ export function exceeds(value: number, bound: number): boolean {
   return value > bound + HAIR * Math.max(1, Math.abs(bound));
 }
 
+/** Below this a length, thickness or strength is as good as none, in whatever unit the register uses. */
+const NOTHING = 1e-6;
+
+/** Known, and more than nothing. */
+export function isSome(value: number | null): value is number {
+  return value !== null && value > NOTHING;
+}
+
 /** Beyond this a ratio says nothing more: nothing is ever divided by a strength of zero. */
 const RATIO_CAP = 99;
 
 /** Load over resistance: 0 for no load, capped when the resistance is zero or next to it. */
 export function ratio(load: number, resistance: number): number {
   if (load <= 0) return 0;
-  return resistance <= 0 ? RATIO_CAP : Math.min(RATIO_CAP, load / resistance);
+  return resistance <= NOTHING ? RATIO_CAP : Math.min(RATIO_CAP, load / resistance);
 }
 
 export function kn(value: number): string {

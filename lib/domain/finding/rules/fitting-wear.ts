@@ -1,6 +1,6 @@
 import type { AnchorQuestion } from "@/lib/domain/finding/evidence";
 import type { Finding } from "@/lib/domain/finding/types";
-import { exceeds, mm, percent, sentence } from "@/lib/domain/finding/words";
+import { exceeds, isSome, mm, percent, sentence } from "@/lib/domain/finding/words";
 
 /** Parts of the diameter gone: discard, and limit (the latter as for chain in EN 818-6, from memory). */
 const STOP_AT = 0.3;
@@ -11,7 +11,7 @@ export function fittingWear(e: AnchorQuestion): Finding | null {
   const worn = e.fittings
     .flatMap((fitting) => {
       const { diameterMm, diameterLeftMm, kind } = fitting;
-      if (kind === "sling" || diameterMm === null || diameterMm <= 0 || diameterLeftMm === null) return [];
+      if (kind === "sling" || !isSome(diameterMm) || diameterLeftMm === null) return [];
       return [{ fitting, diameterMm, diameterLeftMm, lost: 1 - diameterLeftMm / diameterMm }];
     })
     .sort((a, b) => b.lost - a.lost)[0];

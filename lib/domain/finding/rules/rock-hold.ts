@@ -4,7 +4,7 @@ import type { BoltEvidence } from "@/lib/domain/finding/evidence";
 import { loadsOf, onBolt } from "@/lib/domain/finding/loads";
 import { isGlued } from "@/lib/domain/finding/traits";
 import type { Finding } from "@/lib/domain/finding/types";
-import { atMostKn, exceeds, kn } from "@/lib/domain/finding/words";
+import { atMostKn, exceeds, isSome, kn } from "@/lib/domain/finding/words";
 
 /** Bond strength of glue in sound clean holes where its sheet is not on record, MPa (common practice). */
 const BOND_LOW_MPA = 5;
@@ -57,7 +57,7 @@ export function rockHold(e: BoltEvidence, policy: LoadPolicy): Finding | null {
 
 function bond(e: BoltEvidence): Hold | null {
   const { embedmentMm, holeDiameterMm, bondMpa } = e.bolt;
-  if (!isGlued(e.bolt) || !isPositive(embedmentMm) || !isPositive(holeDiameterMm)) return null;
+  if (!isGlued(e.bolt) || !isSome(embedmentMm) || !isSome(holeDiameterMm)) return null;
   const at = (mpa: number) =>
     (estimateBond({
       holeDiaM: holeDiameterMm / 1000,
@@ -65,22 +65,18 @@ function bond(e: BoltEvidence): Hold | null {
       embedM: embedmentMm / 1000,
       tauHolePa: mpa * 1e6,
     }).axialN ?? 0) / 1000;
-  if (bondMpa !== null && bondMpa <= 0) return { what: "the bond", lowKn: 0, highKn: 0 };
+  if (bondMpa !== null && !isSome(bondMpa)) return { what: "the bond", lowKn: 0, highKn: 0 };
   return { what: "the bond", lowKn: at(bondMpa ?? BOND_LOW_MPA), highKn: at(bondMpa ?? BOND_HIGH_MPA) };
 }
 
 function cone(e: BoltEvidence): Hold | null {
   const { embedmentMm } = e.bolt;
   const { ucsMpa } = e.rock;
-  if (!isPositive(embedmentMm) || !isPositive(ucsMpa)) return null;
+  if (!isSome(embedmentMm) || !isSome(ucsMpa)) return null;
   const estimate = estimateRockCone({ embedM: embedmentMm / 1000, ucsPa: ucsMpa * 1e6, quality: QUALITY });
   return {
     what: "the cone of rock",
     lowKn: (estimate.lowN ?? 0) / 1000,
     highKn: (estimate.highN ?? 0) / 1000,
   };
-}
-
-function isPositive(value: number | null): value is number {
-  return value !== null && value > 0;
 }

@@ -3,7 +3,7 @@ import type { LoadPolicy } from "@/lib/domain/policy";
 import type { BoltEvidence, PlacementFacts } from "@/lib/domain/finding/evidence";
 import { loadsOf, onBolt } from "@/lib/domain/finding/loads";
 import type { Finding } from "@/lib/domain/finding/types";
-import { exceeds, mm, percent } from "@/lib/domain/finding/words";
+import { exceeds, isSome, mm, percent } from "@/lib/domain/finding/words";
 
 /** Parts of a lone bolt's cone below which it is said (common practice). */
 const LIMIT_BELOW = 0.6;
@@ -22,7 +22,7 @@ export function rockSpacing(e: BoltEvidence, policy: LoadPolicy): Finding | null
   const loads = loadsOf(e, policy);
   const { embedmentMm } = e.bolt;
   if (loads === null || loads.sharedBy < 2 || e.group === null || e.placement === null) return null;
-  if (embedmentMm === null || embedmentMm <= 0) return null;
+  if (!isSome(embedmentMm)) return null;
   if (![loads.working, ...loads.peaks].some((load) => onBolt(load, 1).axialKn > 0)) return null;
 
   const points = pointsOf(e.placement, e.group.placements);
