@@ -48,7 +48,8 @@ interface RouteSpec<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodTyp
   limit?: AllowanceName;
 }
 
-type Context = { params: Promise<Record<string, string | string[]>> };
+// Next resolves it to undefined where the path has no parameters.
+type Context = { params: Promise<Record<string, string | string[]> | undefined> };
 
 /**
  * The one way to build a route handler: actor, rate limit, zod, one query or command, problem+json.
@@ -70,7 +71,7 @@ export function route<
       if (spec.signedIn && actor.kind === "visitor") throw new AppError("not_signed_in", "Sign in first.");
       if (spec.limit)
         await limitRate(spec.limit, actor.kind === "person" ? actor.userId : addressOf(request.headers));
-      const params = parsePath(spec.params, await context.params);
+      const params = parsePath(spec.params, (await context.params) ?? {});
       const query = parseOrRefuse(
         spec.query ?? nothing,
         Object.fromEntries(new URL(request.url).searchParams),
