@@ -34,7 +34,7 @@ export function FaceDrawing({
       >
         <title id={`${id}-name`}>{`${name}. The list below says what it shows.`}</title>
         <FaceRock drawing={drawing} id={id} />
-        <Lines drawing={drawing} id={id} />
+        <Lines drawing={drawing} />
         <DrawnPlacements drawing={drawing} />
         <Load drawing={drawing} id={id} />
         <Corners drawing={drawing} />
@@ -50,7 +50,7 @@ export function FaceDrawing({
 }
 
 /** Legs from the holes to the ring, and the line through a row. */
-function Lines({ drawing }: { drawing: Drawing; id: string }) {
+function Lines({ drawing }: { drawing: Drawing }) {
   return (
     <g fill="none">
       {drawing.line ? (
@@ -76,6 +76,9 @@ function Lines({ drawing }: { drawing: Drawing; id: string }) {
           className="fill-surface stroke-action"
           strokeWidth="3.4"
         />
+      ) : null}
+      {drawing.masterpoint ? (
+        <Label x={drawing.masterpoint.x - 15} y={drawing.masterpoint.y + 9} end text="masterpoint" />
       ) : null}
     </g>
   );

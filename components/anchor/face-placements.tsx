@@ -62,16 +62,22 @@ function OnePlacement({ placement, strip }: { placement: DrawnPlacement; strip: 
   );
 }
 
-/** Number, state and what else must be known, to the right of the glyph. */
+/** Half widths of what is wider than a bolt. */
+const WIDE: Partial<Record<DrawnPlacement["kind"], number>> = { tree: 17, boulder: 18, thread: 17 };
+
+/** Number, state and what else must be known, beside the glyph; the state's mark stands on its left. */
 function Name({ placement }: { placement: DrawnPlacement }) {
-  const { x, y, number, condition, tag } = placement;
+  const { x, y, number, condition, tag, kind } = placement;
+  const left = placement.numberSide === "left";
+  const gap = WIDE[kind] ?? 14;
   const marked = condition !== null && condition !== "in_service";
   return (
     <g>
       <text
-        x={x + 14}
+        x={left ? x - gap : x + gap}
         y={y + 4.5}
         fontSize="16"
+        textAnchor={left ? "end" : "start"}
         className="fill-text stroke-rock font-bold [paint-order:stroke]"
         strokeWidth="4"
         strokeLinejoin="round"
@@ -84,7 +90,10 @@ function Name({ placement }: { placement: DrawnPlacement }) {
         ) : null}
       </text>
       {marked ? (
-        <g transform={`translate(${x - 30} ${y - 8}) scale(0.66)`} className={MARK_TONES[condition]}>
+        <g
+          transform={`translate(${x - (left ? gap + 28 : 31)} ${y - 8}) scale(0.66)`}
+          className={MARK_TONES[condition]}
+        >
           <MarkPath mark={condition} />
         </g>
       ) : null}

@@ -35,6 +35,8 @@ export interface DrawnPlacement extends At {
   moreReasons: number;
   /** Stands beside the number: "backup", a height. */
   tag: string | null;
+  /** Where the number stands; left when something is drawn to the right. */
+  numberSide: "left" | "right";
 }
 
 export interface DrawnEdge {
@@ -122,7 +124,8 @@ export function balloonsOf(
 export function drawPlacement(
   placement: FacePlacement,
   at: At,
-  more: Pick<DrawnPlacement, "balloons" | "moreReasons"> & { turnDeg?: number; tag?: string | null },
+  more: Pick<DrawnPlacement, "balloons" | "moreReasons"> &
+    Partial<Pick<DrawnPlacement, "turnDeg" | "tag" | "numberSide">>,
 ): DrawnPlacement {
   return {
     ...at,
@@ -135,6 +138,7 @@ export function drawPlacement(
     balloons: more.balloons,
     moreReasons: more.moreReasons,
     tag: more.tag ?? (placement.role === "main" ? null : placement.role),
+    numberSide: more.numberSide ?? "right",
   };
 }
 

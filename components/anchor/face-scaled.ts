@@ -46,11 +46,14 @@ export function buildScaled(input: FaceInput): FaceDrawing {
   const masterpoint = input.masterpoint && frame.at(input.masterpoint);
   const asideHeight = aside.length > 0 ? 78 : 0;
   const centre = { x: WIDTH / 2, y: frame.height / 2 };
+  const deadHoles = placed.flatMap((placement) => placement.deadHoles).map(frame.at);
   const drawn = placed.map((placement) => {
     const at = frame.at(placement);
+    const crowded = deadHoles.some(({ x, y }) => x > at.x && x < at.x + 44 && Math.abs(y - at.y) < 16);
     return drawPlacement(placement, at, {
       ...balloonsOf(input.reasons, placement.number, at, { way: "above", most: 6 }),
       turnDeg: turnTowards(at, masterpoint),
+      numberSide: crowded ? "left" : "right",
     });
   });
   return {
@@ -62,7 +65,7 @@ export function buildScaled(input: FaceInput): FaceDrawing {
       aside.length > 0
         ? { at: { x: 12, y: frame.height }, width: WIDTH - 24, height: asideHeight - 12 }
         : null,
-    deadHoles: placed.flatMap((placement) => placement.deadHoles).map(frame.at),
+    deadHoles,
     bodies: bodiesOf(input, placed, drawn),
     edges: edges.map((edge) => drawEdge(edge, frame.at, averageOf(drawn))),
     masterpoint,
@@ -123,11 +126,17 @@ function averageOf(points: readonly At[]): At | null {
   return { x: sum.x / points.length, y: sum.y / points.length };
 }
 
+/** How far below its hole a leg starts: in the eye. */
+const EYE = 11;
+
 /** A leg to every placement that holds something up; gear at an edge has none. */
 function legsOf(drawn: readonly DrawnPlacement[], to: At): FaceDrawing["legs"] {
   return drawn
     .filter((placement) => placement.role !== "edge" && placement.condition !== "removed")
-    .map(({ x, y, role }) => ({ from: { x, y }, to, role }));
+    .map(({ x, y, role }) => {
+      const reach = EYE / Math.max(EYE, Math.hypot(to.x - x, to.y - y));
+      return { from: { x: x + (to.x - x) * reach, y: y + (to.y - y) * reach }, to, role };
+    });
 }
 
 function setAsideOf(aside: readonly FacePlacement[], input: FaceInput, top: number): DrawnPlacement[] {

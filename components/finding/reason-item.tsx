@@ -29,7 +29,7 @@ export function ReasonItem({ number, reason, subject, children }: ReasonItemProp
         <div className="flex flex-wrap items-baseline gap-x-2 gap-y-1">
           <h3 className="font-sans text-base font-bold [font-stretch:100%]">{reason.title}</h3>
           <Badge tone={TONES[reason.level]}>{LEVEL_LABELS[reason.level]}</Badge>
-          <span className="type-code text-muted">{reason.code}</span>
+          <span className="type-code text-sm text-muted">{reason.code}</span>
           {subject ? <span className="type-label text-muted">{subject}</span> : null}
         </div>
         <p className="max-w-prose">{reason.text}</p>

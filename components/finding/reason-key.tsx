@@ -2,7 +2,7 @@ import { cx } from "@/components/ui/cx";
 import type { Level } from "@/lib/domain/vocabulary";
 
 const LOOKS: Readonly<Record<Level, string>> = {
-  stop: "border-stop-fill bg-stop-ground text-stop",
+  stop: "border-stop bg-stop text-surface",
   ask: "border-info-fill bg-info-ground text-info",
   limit: "border-warn-fill bg-warn-ground text-warn",
   note: "border-line-strong bg-surface text-text",

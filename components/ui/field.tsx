@@ -84,6 +84,6 @@ export function FieldError({ inputId, error }: { inputId: string; error: string 
 /** The box itself, shared by every kind of field. */
 export const inputLook = cx(
   "touch w-full rounded-md border border-line-strong bg-raised px-3 py-2 text-base text-text",
-  "placeholder:text-muted disabled:bg-sunk disabled:text-muted read-only:bg-sunk",
+  "placeholder:text-muted disabled:bg-sunk disabled:text-muted [&[readonly]]:bg-sunk",
   "aria-invalid:border-2 aria-invalid:border-stop-fill",
 );

@@ -32,7 +32,7 @@ export function SubmitButton({
     <button
       type="submit"
       aria-disabled={busy || undefined}
-      className={cx(buttonLook({ tone, width }), className)}
+      className={cx(buttonLook({ tone, width }), "sm:justify-self-start", className)}
       onClick={(event) => {
         if (busy) event.preventDefault();
         else onClick?.(event);
