@@ -45,3 +45,8 @@ export function usesMailSink(): boolean {
   const { SMTP_URL, BYSSUS_DEMO, NODE_ENV } = env();
   return SMTP_URL === undefined && (BYSSUS_DEMO === "1" || NODE_ENV !== "production");
 }
+
+/** The address people type, without a slash at the end. */
+export function publicUrl(): string {
+  return env().BYSSUS_URL.replace(/\/+$/, "");
+}
