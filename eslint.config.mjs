@@ -178,7 +178,7 @@ export default defineConfig([
         },
         {
           selector:
-            "ExportNamedDeclaration VariableDeclarator > :not(Identifier):not(CallExpression[callee.name='action'])",
+            "ExportNamedDeclaration > VariableDeclaration > VariableDeclarator > :not(Identifier):not(CallExpression[callee.name='action'])",
           message: "A server action is a public endpoint: build it with action().",
         },
         { selector: "ExportDefaultDeclaration", message: "Named exports only." },

@@ -1,8 +1,8 @@
 import "server-only";
+import { validate } from "uuid";
 import { getDb } from "@/db/client";
 import { findSinkMail, listSinkMails, type SinkMailRow } from "@/db/repositories/sink-mails";
 import { usesMailSink } from "@/lib/config/env";
-import { AppError } from "@/lib/shared/errors";
 
 export interface CaughtMailView {
   id: string;
@@ -13,22 +13,15 @@ export interface CaughtMailView {
   receivedAt: string;
 }
 
-/** Mail caught by the local sink, newest first. @throws AppError `not_found` where there is no sink. */
+/** Mail caught by the local sink, newest first; none where there is no sink. */
 export async function listCaughtMails(): Promise<CaughtMailView[]> {
-  requireSink();
-  return (await listSinkMails(getDb())).map(viewOf);
+  return usesMailSink() ? (await listSinkMails(getDb())).map(viewOf) : [];
 }
 
-/** @throws AppError `not_found` */
-export async function getCaughtMail(id: string): Promise<CaughtMailView> {
-  requireSink();
-  const row = await findSinkMail(getDb(), id);
-  if (!row) throw new AppError("not_found", "There is no such mail.");
-  return viewOf(row);
-}
-
-function requireSink(): void {
-  if (!usesMailSink()) throw new AppError("not_found", "There is no mailbox here: mail really leaves.");
+/** Null where there is no such mail, or no sink. */
+export async function findCaughtMail(id: string): Promise<CaughtMailView | null> {
+  const row = usesMailSink() && validate(id) ? await findSinkMail(getDb(), id) : null;
+  return row ? viewOf(row) : null;
 }
 
 function viewOf({ id, toAddress, subject, body, receivedAt }: SinkMailRow): CaughtMailView {
