@@ -191,6 +191,7 @@ function throat(
           facts: { role: "backup", deadHoles: [{ xMm: 470, yMm: 990 }] },
           bolts: [stud()],
         },
+        { at: [760, 1_040, 30], facts: { role: "backup" }, bolts: [stud()] },
       ],
     }),
   );
