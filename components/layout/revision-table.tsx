@@ -36,16 +36,3 @@ export function RevisionTable({ revisions }: { revisions: readonly Revision[] })
     </Table>
   );
 }
-
-/** 1 → A, 24 → Z, 25 → AA; without I and O, which read as 1 and 0 (common practice on drawings). */
-export function revisionLetter(number: number): string {
-  const letters = "ABCDEFGHJKLMNPQRSTUVWXYZ";
-  let left = Math.max(1, Math.floor(number));
-  let name = "";
-  while (left > 0) {
-    const place = (left - 1) % letters.length;
-    name = letters.charAt(place) + name;
-    left = (left - 1 - place) / letters.length;
-  }
-  return name;
-}

@@ -102,7 +102,7 @@ export function formatInstant(at: string, timeZone: string): string {
   const part = (type: Intl.DateTimeFormatPartTypes) =>
     parts.find((entry) => entry.type === type)?.value ?? "";
   const monthName = MONTHS[Number(part("month")) - 1] ?? "";
-  return `${part("day")} ${monthName} ${part("year")}, ${part("hour")}:${part("minute")}`;
+  return `${Number(part("day"))} ${monthName} ${part("year")}, ${part("hour")}:${part("minute")}`;
 }
 
 /** `["a", "b", "c"]` → `a, b and c`. */

@@ -7,7 +7,9 @@ const files = readdirSync(root, { recursive: true, encoding: "utf8" }).filter((n
 it("no component writes a colour of its own: tokens only", () => {
   expect(files.length).toBeGreaterThan(40);
   const own = files.filter((name) =>
-    /["'`\s(\[]#[0-9a-fA-F]{3,8}\b(?!["'`]?\s*\})|\b(rgb|hsl|oklch)a?\(/.test(readFileSync(new URL(name, root), "utf8")),
+    /["'`\s(\[]#[0-9a-fA-F]{3,8}\b(?!["'`]?\s*\})|\b(rgb|hsl|oklch)a?\(/.test(
+      readFileSync(new URL(name, root), "utf8"),
+    ),
   );
   expect(own).toEqual([]);
 });
