@@ -211,6 +211,8 @@ export default defineConfig([
       complexity: ["warn", 12],
       "@typescript-eslint/consistent-type-imports": "error",
       "@typescript-eslint/no-explicit-any": "error",
+      // `{ left: _left, ...rest }` is how a field is left out.
+      "@typescript-eslint/no-unused-vars": ["warn", { ignoreRestSiblings: true }],
       "@typescript-eslint/no-non-null-assertion": "error",
       "no-console": "error",
     },

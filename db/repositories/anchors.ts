@@ -86,18 +86,14 @@ export async function findPlacement(db: Handle, id: string): Promise<PlacementRo
   return row ?? null;
 }
 
-/** @returns how many were inserted: fewer than given when an id or number is taken. */
+/** @returns false when an id or number is taken. */
 export async function insertPlacements(
   tx: Tx,
   rows: readonly (typeof placements.$inferInsert)[],
-): Promise<number> {
-  if (rows.length === 0) return 0;
-  const done = await tx
-    .insert(placements)
-    .values([...rows])
-    .onConflictDoNothing()
-    .returning({ id: placements.id });
-  return done.length;
+): Promise<boolean> {
+  if (rows.length === 0) return true;
+  const insert = tx.insert(placements).values([...rows]);
+  return (await insert.onConflictDoNothing().returning({ id: placements.id })).length === rows.length;
 }
 
 export async function updatePlacementRow(
@@ -112,29 +108,31 @@ export async function updatePlacementRow(
     .where(eq(placements.id, id));
 }
 
-export async function insertParts(
+/** @returns false when an id is taken. */
+export async function insertRockBodies(
   tx: Tx,
-  parts: {
-    rockBodies: readonly (typeof rockBodies.$inferInsert)[];
-    edges: readonly (typeof edges.$inferInsert)[];
-    fittings: readonly (typeof fittings.$inferInsert)[];
-  },
-): Promise<void> {
-  if (parts.rockBodies.length > 0)
-    await tx
-      .insert(rockBodies)
-      .values([...parts.rockBodies])
-      .onConflictDoNothing();
-  if (parts.edges.length > 0)
-    await tx
-      .insert(edges)
-      .values([...parts.edges])
-      .onConflictDoNothing();
-  if (parts.fittings.length > 0)
-    await tx
-      .insert(fittings)
-      .values([...parts.fittings])
-      .onConflictDoNothing();
+  rows: readonly (typeof rockBodies.$inferInsert)[],
+): Promise<boolean> {
+  if (rows.length === 0) return true;
+  const insert = tx.insert(rockBodies).values([...rows]);
+  return (await insert.onConflictDoNothing().returning({ id: rockBodies.id })).length === rows.length;
+}
+
+/** @returns false when an id is taken. */
+export async function insertEdges(tx: Tx, rows: readonly (typeof edges.$inferInsert)[]): Promise<boolean> {
+  if (rows.length === 0) return true;
+  const insert = tx.insert(edges).values([...rows]);
+  return (await insert.onConflictDoNothing().returning({ id: edges.id })).length === rows.length;
+}
+
+/** @returns false when an id is taken. */
+export async function insertFittings(
+  tx: Tx,
+  rows: readonly (typeof fittings.$inferInsert)[],
+): Promise<boolean> {
+  if (rows.length === 0) return true;
+  const insert = tx.insert(fittings).values([...rows]);
+  return (await insert.onConflictDoNothing().returning({ id: fittings.id })).length === rows.length;
 }
 
 export async function findFitting(db: Handle, id: string) {

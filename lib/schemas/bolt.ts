@@ -14,7 +14,7 @@ import {
   whole,
   yesNo,
 } from "@/lib/schemas/fields";
-import { DATE_PRECISIONS, FORMS, HOLE_CLEANINGS, HOLE_FATES, METHODS } from "@/lib/domain/vocabulary";
+import { DATE_PRECISIONS, FORMS, HOLE_CLEANINGS, METHODS } from "@/lib/domain/vocabulary";
 
 const boltFacts = {
   boltTypeId: id.nullable().optional(),
@@ -54,9 +54,8 @@ const installFacts = {
   installedOn: day.nullable().optional(),
   /** When it was set, for glue: the cure time counts from here. Missing: now. */
   installedAt: instant.optional(),
-  /** Why the former bolt came out, when there was one, and what became of its hole. */
+  /** Why the former bolt came out, when there was one. */
   removedWhy: text(500).optional(),
-  holeFate: oneOf(HOLE_FATES).optional(),
 };
 
 export const logInstallInput = z

@@ -30,6 +30,9 @@ export const fileReportInput = z
       .default({}),
     grade: whole(0, 4).nullable().default(null),
     note: note(4000).default(""),
+    /** The code on the anchor's tag: lets somebody without an account report; it waits to be confirmed. */
+    tagCode: text(40).optional(),
+    reporterName: text(120).optional(),
   })
   .meta({ id: "NewReport" });
 export type FileReportInput = z.output<typeof fileReportInput>;

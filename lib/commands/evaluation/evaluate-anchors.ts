@@ -4,6 +4,7 @@ import { loadStoredResults, replaceBoltEvals, upsertAnchorEvals } from "@/db/rep
 import { loadEvidenceRows } from "@/db/repositories/evidence";
 import { applyConditions, conditionOf } from "@/lib/commands/evaluation/apply-conditions";
 import { assembleEvidence } from "@/lib/commands/evaluation/assemble-evidence";
+import { rankJobs } from "@/lib/commands/evaluation/rank-jobs";
 import { type RowsOfAnchor, rowsByAnchor } from "@/lib/commands/evaluation/rows-by-anchor";
 import { storeFindings } from "@/lib/commands/evaluation/store-findings";
 import { type AnchorVerdict, evaluateAnchor } from "@/lib/domain/finding/evaluate-anchor";
@@ -34,6 +35,7 @@ export async function evaluateAnchors(
   const judged = rowsByAnchor(rows).map((anchorRows) => judge(anchorRows, now));
   await storeFindings(tx, stored.findings, judged);
   await storeEvals(tx, anchorIds, judged, now);
+  await rankJobs(tx, judged, now);
 
   const done: EvaluatedAnchor[] = [];
   for (const { anchor, areaId, bolts, condition, result } of judged) {
@@ -60,7 +62,8 @@ function judge({ all, bolts, ...rows }: RowsOfAnchor, now: Date) {
   const onDate = dayAt(now, area.timeZone);
   const evidence = assembleEvidence({ ...rows, bolts, outOfUseBoltIds: new Set(out) }, { now, onDate });
   const result = evaluateAnchor(evidence, rows.policy);
-  return { anchor, areaId: area.id, policyVersion: rows.policy.version, bolts: all, condition, result };
+  const { reports, policy } = rows;
+  return { anchor, areaId: area.id, policyVersion: policy.version, bolts: all, reports, condition, result };
 }
 
 async function storeEvals(
