@@ -31,12 +31,13 @@ export const bbox = z
   .refine(([, south, , north]) => south <= north, "South lies above north.")
   .meta({ description: "west,south,east,north in degrees; west greater than east crosses the antimeridian" });
 
-const near = z
+/** `lon,lat`. */
+export const pointParam = z
   .string()
   .transform(numbers)
   .pipe(z.tuple([lon, lat]))
-  .transform(([x, y]) => ({ lon: x, lat: y }))
-  .meta({ description: "lon,lat: nearest first" });
+  .transform(([x, y]) => ({ lon: x, lat: y }));
+const near = pointParam.meta({ description: "lon,lat: nearest first" });
 
 /** One or several values, comma separated. */
 const conditions = z
