@@ -2,6 +2,7 @@
 
 import Link from "next/link";
 import { enterWithPassword } from "@/components/account/enter";
+import { refusedInWords } from "@/components/account/refused-in-words";
 import { PasswordField } from "@/components/account/password-field";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import { SubmitButton } from "@/components/ui/submit-button";
@@ -52,11 +53,5 @@ async function tryPassword(sent: unknown, to: string): Promise<ActionState<null>
   if (problems.length > 0) {
     return { state: "refused", code: "invalid_input", message: "Both are needed.", problems, values: {} };
   }
-  try {
-    await enterWithPassword(text("email"), text("password"), to);
-    return { state: "done", result: null };
-  } catch (error) {
-    const message = error instanceof Error ? error.message : "Something went wrong. Try again.";
-    return { state: "refused", code: "not_signed_in", message, problems: [], values: {} };
-  }
+  return refusedInWords(() => enterWithPassword(text("email"), text("password"), to));
 }

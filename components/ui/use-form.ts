@@ -12,7 +12,11 @@ export interface Form<R> {
   /** What is wrong with one field. */
   errorOf: (path: string) => string | undefined;
   /** Spread on the form. */
-  formProps: { onSubmit: (event: FormEvent<HTMLFormElement>) => void; noValidate: true };
+  formProps: {
+    action: (sent: FormData) => void;
+    onSubmit: (event: FormEvent<HTMLFormElement>) => void;
+    noValidate: true;
+  };
 }
 
 /**
@@ -36,6 +40,9 @@ export function useForm<R>(action: FormAction<R>, onDone?: (result: R) => unknow
     errorOf: (path) => problems.find((problem) => problem.path === path)?.message,
     formProps: {
       noValidate: true,
+      // Takes what is sent before the page has woken up: it waits, and never ends in the address bar.
+      action: dispatch,
+      // Once awake: sent by hand, because React empties a form that it sends itself.
       onSubmit: (event) => {
         event.preventDefault();
         const sent = new FormData(event.currentTarget);
