@@ -43,19 +43,4 @@ const code = localFont({
   preload: false,
 });
 
-/** The narrow space between a number and its unit: the faces above make it too narrow to be seen. */
-const thinSpace = localFont({
-  src: "../public/fonts/atkinson-hyperlegible-mono-latin.woff2",
-  variable: "--font-thin-space",
-  display: "swap",
-  preload: false,
-  adjustFontFallback: false,
-  declarations: [
-    { prop: "unicode-range", value: "U+202F" },
-    { prop: "size-adjust", value: "60%" },
-  ],
-});
-
-export const fontVariables = [text, textExtended, label, code, thinSpace]
-  .map((font) => font.variable)
-  .join(" ");
+export const fontVariables = [text, textExtended, label, code].map((font) => font.variable).join(" ");

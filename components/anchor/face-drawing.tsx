@@ -25,12 +25,12 @@ export function FaceDrawing({
   const id = useId();
   const drawing = buildFaceDrawing(input);
   return (
-    <figure className={cx("w-full max-w-[40rem]", className)}>
+    <figure className={cx("w-full max-w-[36rem]", className)}>
       <svg
         viewBox={`0 0 ${drawing.width} ${drawing.height}`}
         role="img"
         aria-labelledby={`${id}-name`}
-        className="block h-auto w-full border border-frame bg-surface font-label text-text [font-stretch:80%] print:max-h-[120mm]"
+        className="block h-auto w-full border border-frame bg-surface font-label tracking-wide text-text [font-stretch:80%] print:h-[120mm] print:w-auto print:max-w-full"
       >
         <title id={`${id}-name`}>{`${name}. The list below says what it shows.`}</title>
         <FaceRock drawing={drawing} id={id} />
@@ -136,7 +136,7 @@ export function Label({ x, y, text, end }: { x: number; y: number; text: string;
     <text
       x={x}
       y={y}
-      fontSize="12.5"
+      fontSize="13"
       textAnchor={end ? "end" : "start"}
       className="fill-text stroke-rock font-medium [paint-order:stroke]"
       strokeWidth="4"
@@ -147,68 +147,62 @@ export function Label({ x, y, text, end }: { x: number; y: number; text: string;
   );
 }
 
+/** What stands in the corners: scale, north, the word "not to scale", reasons about the whole anchor. */
 function Corners({ drawing }: { drawing: Drawing }) {
   const { scaleBar, north, anchorBalloons } = drawing;
   const lastBalloon = anchorBalloons[anchorBalloons.length - 1];
   return (
     <g>
-      {scaleBar ? (
-        <g transform={`translate(${scaleBar.at.x} ${scaleBar.at.y})`}>
-          <rect width={scaleBar.length / 2} height="5" className="fill-text" />
-          <rect
-            x={scaleBar.length / 2}
-            width={scaleBar.length / 2}
-            height="5"
-            className="fill-surface stroke-text"
-            strokeWidth="1"
-          />
-          <Label x={0} y={-6} text="0" />
-          <Label x={scaleBar.length} y={-6} end text={scaleBar.label} />
-        </g>
-      ) : null}
-      {drawing.kind === "schematic" ? (
-        <g>
-          <rect
-            x="12"
-            y={drawing.height - 38}
-            width="126"
-            height="26"
-            className="fill-warn-ground stroke-warn-fill"
-          />
-          <text
-            x="75"
-            y={drawing.height - 20.5}
-            fontSize="14"
-            textAnchor="middle"
-            className="fill-warn font-bold"
-          >
-            NOT TO SCALE
-          </text>
-        </g>
-      ) : null}
-      {north ? (
-        <g transform={`translate(${north.at.x} ${north.at.y})`}>
-          <circle r="17" className="fill-surface stroke-text" strokeWidth="1" />
-          <path
-            d="M0-13 4.5 9 0 5-4.5 9Z"
-            transform={`rotate(${(Math.atan2(north.dx, -north.dy) * 180) / Math.PI})`}
-            className="fill-text"
-          />
-          <text
-            x={north.dx * 25}
-            y={north.dy * 25 + 4.5}
-            fontSize="12.5"
-            textAnchor="middle"
-            className="fill-text font-bold"
-          >
-            N
-          </text>
-        </g>
-      ) : null}
+      {scaleBar ? <ScaleBar bar={scaleBar} /> : null}
+      {drawing.kind === "schematic" ? <NotToScale bottom={drawing.height} /> : null}
+      {north ? <NorthArrow north={north} /> : null}
       {anchorBalloons.map((balloon) => (
         <BalloonShape key={balloon.number} balloon={balloon} />
       ))}
       {lastBalloon ? <Label x={lastBalloon.x + 15} y={lastBalloon.y + 4.5} text="whole anchor" /> : null}
+    </g>
+  );
+}
+
+function ScaleBar({ bar }: { bar: NonNullable<Drawing["scaleBar"]> }) {
+  const half = bar.length / 2;
+  return (
+    <g transform={`translate(${bar.at.x} ${bar.at.y})`}>
+      <rect width={half} height="5" className="fill-text" />
+      <rect x={half} width={half} height="5" className="fill-surface stroke-text" strokeWidth="1" />
+      <Label x={0} y={-6} text="0" />
+      <Label x={bar.length} y={-6} end text={bar.label} />
+    </g>
+  );
+}
+
+function NotToScale({ bottom }: { bottom: number }) {
+  return (
+    <g>
+      <rect x="16" y={bottom - 42} width="126" height="26" className="fill-warn-ground stroke-warn-fill" />
+      <text x="79" y={bottom - 24} fontSize="14" textAnchor="middle" className="fill-warn font-bold">
+        NOT TO SCALE
+      </text>
+    </g>
+  );
+}
+
+function NorthArrow({ north }: { north: NonNullable<Drawing["north"]> }) {
+  const turn = (Math.atan2(north.dx, -north.dy) * 180) / Math.PI;
+  return (
+    <g transform={`translate(${north.at.x} ${north.at.y})`}>
+      <circle r="16" className="fill-surface stroke-text" strokeWidth="1" />
+      <path d="M0-12 4.2 8.5 0 5-4.2 8.5Z" transform={`rotate(${turn})`} className="fill-text" />
+      <text
+        x={north.dx * 24}
+        y={north.dy * 24 + 4.5}
+        fontSize="13"
+        textAnchor="middle"
+        className="fill-text stroke-rock font-bold [paint-order:stroke]"
+        strokeWidth="3"
+      >
+        N
+      </text>
     </g>
   );
 }

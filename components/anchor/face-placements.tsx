@@ -54,7 +54,7 @@ function OnePlacement({ placement, strip }: { placement: DrawnPlacement; strip: 
         <BalloonShape key={balloon.number} balloon={balloon} />
       ))}
       {moreReasons > 0 && last ? (
-        <text x={last.x + 13} y={last.y + 4} fontSize="12" className="fill-muted font-medium">
+        <text x={last.x + 13} y={last.y + 4} fontSize="12.5" className="fill-muted font-medium">
           {`+${moreReasons}`}
         </text>
       ) : null}
@@ -84,7 +84,7 @@ function Name({ placement }: { placement: DrawnPlacement }) {
       >
         {number}
         {tag ? (
-          <tspan dx="5" fontSize="12" className="font-medium">
+          <tspan dx="5" fontSize="12.5" className="font-medium">
             {tag}
           </tspan>
         ) : null}

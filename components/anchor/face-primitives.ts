@@ -8,8 +8,8 @@ import type {
   Sharpness,
 } from "@/lib/domain/vocabulary";
 
-/** Units of the drawing: 1 is about 1 px on a phone, up to 1.5 px on a desk. */
-export const WIDTH = 420;
+/** Units of the drawing: 1 is about 0.85 px on a narrow phone, up to 1.6 px on a desk. */
+export const WIDTH = 372;
 export const BALLOON = 9.5;
 
 export interface At {

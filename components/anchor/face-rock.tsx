@@ -35,27 +35,7 @@ export function FaceRock({ drawing, id }: { drawing: FaceDrawing; id: string }) 
       />
       {drawing.setAside ? <SetAside box={drawing.setAside} /> : null}
       {drawing.bodies.map((body) => (
-        <g key={body.label}>
-          <rect
-            x={body.at.x}
-            y={body.at.y}
-            width={body.width}
-            height={body.height}
-            rx="18"
-            fill="none"
-            className="stroke-warn-fill"
-            strokeWidth="1.6"
-            strokeDasharray="9 4 2 4"
-          />
-          <text
-            x={body.at.x + 10}
-            y={body.at.y + body.height + 14}
-            fontSize="12"
-            className="fill-warn font-medium"
-          >
-            {body.label}
-          </text>
-        </g>
+        <BodyOutline key={body.label} body={body} />
       ))}
       {drawing.edges.map((edge) => (
         <EdgeLine key={edge.label} edge={edge} />
@@ -73,6 +53,33 @@ export function FaceRock({ drawing, id }: { drawing: FaceDrawing; id: string }) 
   );
 }
 
+/** A block that is not part of the cliff: a chain line round what sits in it. */
+function BodyOutline({ body }: { body: FaceDrawing["bodies"][number] }) {
+  return (
+    <g>
+      <rect
+        x={body.at.x}
+        y={body.at.y}
+        width={body.width}
+        height={body.height}
+        rx="18"
+        fill="none"
+        className="stroke-warn-fill"
+        strokeWidth="1.6"
+        strokeDasharray="9 4 2 4"
+      />
+      <text
+        x={body.at.x + 10}
+        y={body.at.y + body.height + 14}
+        fontSize="12.5"
+        className="fill-warn font-medium"
+      >
+        {body.label}
+      </text>
+    </g>
+  );
+}
+
 function SetAside({ box }: { box: NonNullable<FaceDrawing["setAside"]> }) {
   return (
     <g>
@@ -84,7 +91,7 @@ function SetAside({ box }: { box: NonNullable<FaceDrawing["setAside"]> }) {
         className="fill-surface stroke-line-strong"
         strokeDasharray="5 3"
       />
-      <text x={box.at.x + 8} y={box.at.y + 15} fontSize="12" className="fill-muted font-medium">
+      <text x={box.at.x + 8} y={box.at.y + 15} fontSize="12.5" className="fill-muted font-medium">
         position not measured
       </text>
     </g>
@@ -117,7 +124,7 @@ function EdgeLine({ edge }: { edge: DrawnEdge }) {
       <text
         x={Math.max(16, Math.min(from.x, to.x) + 4)}
         y={(from.x <= to.x ? from.y : to.y) + (rockSide.y <= 0 ? 16 : -8)}
-        fontSize="12"
+        fontSize="12.5"
         className={cx("fill-text stroke-none font-medium")}
       >
         {`${edge.label} (${edge.sharpness})`}
@@ -140,7 +147,7 @@ function DimensionLine({ dimension }: { dimension: Dimension }) {
       <text
         x={middle}
         y={from.y - 4}
-        fontSize="12"
+        fontSize="12.5"
         textAnchor="middle"
         className="fill-text stroke-none font-medium"
       >

@@ -29,7 +29,7 @@ export function buildRow(input: FaceInput): FaceDrawing {
   const perMm = Math.min(980, Math.max(320, LEAST_GAP / smallestGap(heights, span))) / span;
   const height = TOP + span * perMm + BOTTOM;
   const y = scaleLinear([low, low + span], [height - BOTTOM, TOP]);
-  const x = scaleLinear([0, 1], [150, 150 + perMm]);
+  const x = scaleLinear([0, 1], [118, 118 + perMm]);
   const stepMm = roundStep(100 / perMm);
   const points = bolts.map(({ xMm, yMm }): At => ({ x: x(xMm), y: y(yMm) }));
   return {
@@ -38,7 +38,7 @@ export function buildRow(input: FaceInput): FaceDrawing {
     height,
     placements: bolts.map(({ placement, yMm }, index) => {
       const at = points[index] ?? { x: 0, y: 0 };
-      const beside = { x: at.x + 92, y: at.y };
+      const beside = { x: at.x + 94, y: at.y };
       return drawPlacement(placement, at, {
         ...balloonsOf(input.reasons, placement.number, beside, { way: "right", most: 7 }),
         tag: formatQuantity(yMm / 1000, "m", { digits: 1, signed: true }),

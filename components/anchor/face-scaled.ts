@@ -17,7 +17,7 @@ import {
   WIDTH,
 } from "@/components/anchor/face-primitives";
 
-const SIDE = 44;
+const SIDE = 40;
 const TOP = 92;
 const BOTTOM = 66;
 const MOST_HEIGHT = 560;

@@ -11,22 +11,22 @@ interface SheetFrameProps {
 
 /**
  * A page about one thing, drawn as a sheet: thin outer line, frame, zone marks along the edges, title block.
- * On the screen the title block comes first, because it answers first; on paper it stands at the foot.
+ * The title block comes first, on paper too: it answers first, and a sheet may run over several pages.
  */
 export function SheetFrame({ title, actions, children }: SheetFrameProps) {
   return (
-    <article className="mx-auto max-w-[96rem] px-1.5 pt-3 sm:px-6 sm:pt-6 print:max-w-none print:p-0">
+    <article className="mx-auto max-w-[96rem] px-1 pt-2 sm:px-6 sm:pt-6 print:max-w-none print:p-0">
       {actions ? (
         <div className="no-print mb-3 flex flex-wrap justify-end gap-2 px-1.5 sm:px-0">{actions}</div>
       ) : null}
       <div className="grid grid-cols-1 border border-line-strong bg-surface md:grid-cols-[1.25rem_1fr_1.25rem] print:grid-cols-1">
         <Zones names={COLUMNS} className="md:col-start-2" />
         <Zones names={ROWS} vertical className="md:col-start-1 md:row-start-2" />
-        <div className="mx-1.5 flex min-w-0 flex-col border-2 border-frame md:col-start-2 md:row-start-2 md:mx-0 print:mx-0">
-          <div className="border-b-2 border-frame print:order-last print:border-t-2 print:border-b-0">
+        <div className="mx-1 flex min-w-0 flex-col border-2 border-frame md:col-start-2 md:row-start-2 md:mx-0 print:mx-0">
+          <div className="border-b-2 border-frame">
             <TitleBlock {...title} />
           </div>
-          <div className="p-3 sm:p-6 print:p-3">{children}</div>
+          <div className="px-2.5 py-3 sm:p-6 print:p-3">{children}</div>
         </div>
         <Zones names={ROWS} vertical className="md:col-start-3 md:row-start-2" />
         <Zones names={COLUMNS} className="md:col-start-2 md:row-start-3" />
