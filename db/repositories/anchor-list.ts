@@ -1,7 +1,7 @@
 import "server-only";
 import { and, asc, eq, gt, inArray, or, type SQL, sql } from "drizzle-orm";
 import type { Handle } from "@/db/client";
-import { anchorEval, anchors, areas, bolts, findings, placements, reports, sites } from "@/db/schema";
+import { anchorEval, anchors, areas, boltTypes, bolts, findings, placements, reports, sites } from "@/db/schema";
 import { seesExactly, shownPoint, visibleAnchors } from "@/db/repositories/visibility";
 import type { Condition, Form, Level, RuleCode, Use, Verdict } from "@/lib/domain/vocabulary";
 import type { Audience } from "@/lib/shared/audience";
@@ -47,6 +47,13 @@ const boltCountSql = sql<number>`(
   select count(*)::int from ${bolts} b join ${placements} p on p.id = b.placement_id
   where p.anchor_id = ${anchors.id} and b.removed_on is null and b.struck_at is null)`;
 
+/** How each bolt in force is fixed and what it is made of, each pair told once. */
+const hardwareSql = sql<{ form: Form; metal: string | null }[]>`(
+  select coalesce(json_agg(json_build_object('form', h.form, 'metal', h.metal) order by h.form, h.metal), '[]'::json)
+  from (select distinct b.form, coalesce(b.bolt_metal, t.bolt_metal) as metal
+        from ${bolts} b join ${placements} p on p.id = b.placement_id left join ${boltTypes} t on t.id = b.bolt_type_id
+        where p.anchor_id = ${anchors.id} and b.removed_on is null and b.struck_at is null) h)`;
+
 const openReportsSql = sql<number>`(
   select count(*)::int from ${reports} r where r.anchor_id = ${anchors.id} and r.state = 'open')`;
 
@@ -79,6 +86,7 @@ export async function listAnchorRows(db: Handle, who: Audience, filter: AnchorFi
       lat: sql<number>`ST_Y(${shownPoint(who)})`,
       seaDistanceM: anchors.seaDistanceM,
       boltCount: boltCountSql,
+      hardware: hardwareSql,
       openReports: openReportsSql,
       lastCheckOn: lastCheckSql,
       reasons: reasonsSql,

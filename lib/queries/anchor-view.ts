@@ -33,6 +33,7 @@ export function summaryView(row: AnchorListRow, actor: Actor): AnchorSummary {
     exact,
     seaDistanceM: row.seaDistanceM,
     boltCount: row.boltCount,
+    hardware: row.hardware,
     openReports: row.openReports,
     lastCheckOn: row.lastCheckOn,
     reasons: row.reasons,

@@ -19,6 +19,7 @@ import {
   conditionView,
   dateView,
   findingView,
+  formView,
   instantView,
   levelView,
   placeClassView,
@@ -49,6 +50,8 @@ export const anchorSummaryView = z
     exact: z.boolean(),
     seaDistanceM: quantity,
     boltCount: z.number(),
+    /** How the bolts in force are fixed and what they are made of, each pair once; natural placements have none. */
+    hardware: z.array(z.object({ form: formView, metal: words })),
     openReports: z.number(),
     lastCheckOn: dateView.nullable(),
     reasons: z.array(z.object({ code: codeView, level: levelView, title: z.string() })),
