@@ -58,6 +58,12 @@ describe("load.strength, one bolt carrying all", () => {
     expect(claimed(null)).toContain("rated strength");
   });
 
+  it("keeps 2.5 times the working case where the peak is no larger", () => {
+    const demand = { workingKn: 6, peakKn: 6, angleFromAxisDeg: 90, origin: "typed" };
+    expect(levelOf(choosing("highline", { bolt: rated(14.9), demand }), "load.strength")).toBe("limit");
+    expect(levelOf(choosing("highline", { bolt: rated(15), demand }), "load.strength")).toBeNull();
+  });
+
   it("never reads a rating of zero as a pass", () => {
     expect(levelOf(choosing("protection", { bolt: rated(0) }), "load.strength")).toBe("stop");
     expect(levelOf(choosing("belay", { bolt: rated(25, 0) }), "load.strength")).toBe("stop");
@@ -91,6 +97,12 @@ describe("load.strength in the rock, between the bounds of sharing", () => {
     expect(of("highline", 6, 2)).toBe("ask");
     expect(of("abseil", 5.9, 2)).toBe("stop");
     expect(of("abseil", 6, 2)).toBe("limit");
+  });
+
+  it("lets one bolt carry all while a type is being chosen, also for an anchor of three", () => {
+    const e = inRock("highline", { bolt: rated(11), group: group({ mainCount: 3 }) });
+    expect(levelOf(e, "load.strength")).toBe("ask");
+    expect(levelOf({ ...e, context: "choosing" }, "load.strength")).toBe("stop");
   });
 
   it("sends a redirected belay fall through one bolt however many there are", () => {

@@ -147,6 +147,20 @@ describe("care.overdue", () => {
     expect(level("highline", "2024-05-31", null)).toBe("limit");
   });
 
+  it("counts months to the last day of a shorter one: from 31 August, 6 months end on 28 February", () => {
+    const on = (onDate: string) =>
+      levelOf(
+        inRock("rope_access", {
+          bolt: { installedOn: null },
+          care: { ...NO_CARE, lastCheckOn: "2024-08-31" },
+          onDate,
+        }),
+        "care.overdue",
+      );
+    expect(on("2025-02-28")).toBeNull();
+    expect(on("2025-03-01")).toBe("note");
+  });
+
   it("counts an install as a check", () => {
     expect(level("highline", null, "2026-01-01")).toBeNull();
     expect(level("highline", "2020-01-01", "2026-01-01")).toBeNull();
