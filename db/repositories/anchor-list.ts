@@ -1,7 +1,17 @@
 import "server-only";
 import { and, asc, eq, gt, inArray, or, type SQL, sql } from "drizzle-orm";
 import type { Handle } from "@/db/client";
-import { anchorEval, anchors, areas, boltTypes, bolts, findings, placements, reports, sites } from "@/db/schema";
+import {
+  anchorEval,
+  anchors,
+  areas,
+  boltTypes,
+  bolts,
+  findings,
+  placements,
+  reports,
+  sites,
+} from "@/db/schema";
 import { seesExactly, shownPoint, visibleAnchors } from "@/db/repositories/visibility";
 import type { Condition, Form, Level, RuleCode, Use, Verdict } from "@/lib/domain/vocabulary";
 import type { Audience } from "@/lib/shared/audience";
