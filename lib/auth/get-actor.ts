@@ -32,7 +32,7 @@ export async function actorFromRequest(request: Request): Promise<Actor> {
 }
 
 /** The person as an actor; null when gone, disabled, or the session belongs to an earlier epoch. */
-async function loadPerson(
+export async function loadPerson(
   db: Db,
   userId: string,
   by: { epoch?: number; scopes?: TokenScope[] },

@@ -15,7 +15,7 @@ const HINT_LENGTH = 6;
  * Makes a token for a program. It is shown this once; a second send of the same id cannot show it again and
  * is refused as a conflict.
  */
-export function createApiToken(ctx: CommandContext, input: CreateTokenInput): Promise<{ token: string }> {
+export async function createApiToken(ctx: CommandContext, input: CreateTokenInput): Promise<{ token: string }> {
   const { userId } = requireSelf(ctx.actor);
   const { now } = ctx;
   return inTransaction(ctx.db, async (tx) => {
@@ -45,7 +45,7 @@ export function createApiToken(ctx: CommandContext, input: CreateTokenInput): Pr
 }
 
 /** Ends one of the person's own tokens at once. */
-export function revokeApiToken(ctx: CommandContext, input: { id: string }): Promise<void> {
+export async function revokeApiToken(ctx: CommandContext, input: { id: string }): Promise<void> {
   const { userId } = requireSelf(ctx.actor);
   return inTransaction(ctx.db, async (tx) => {
     const name = await revoke(tx, input.id, userId, ctx.now);
