@@ -13,6 +13,7 @@ const config: NextConfig = {
     "nodemailer",
     "postgres",
   ],
+  allowedDevOrigins: ["127.0.0.1"],
   typedRoutes: false,
   experimental: {
     serverActions: { bodySizeLimit: "2mb" },
