@@ -64,6 +64,32 @@ export async function answerReports(
   return rows.map((row) => row.id);
 }
 
+/** Opens again what an install answered that was never made. */
+export async function reopenReports(
+  tx: Tx,
+  answered: { placementId: string; handledAt: Date },
+  by: { userId: string; now: Date },
+): Promise<void> {
+  await tx
+    .update(reports)
+    .set({
+      state: "open",
+      handledAt: null,
+      handledBy: null,
+      handledHow: null,
+      updatedAt: by.now,
+      updatedBy: by.userId,
+      version: sql`${reports.version} + 1`,
+    })
+    .where(
+      and(
+        eq(reports.placementId, answered.placementId),
+        eq(reports.state, "handled"),
+        eq(reports.handledAt, answered.handledAt),
+      ),
+    );
+}
+
 /** When the anchor was last put back in service; null: never. */
 export async function lastReturnAt(db: Handle, anchorId: string): Promise<Date | null> {
   const [row] = await db

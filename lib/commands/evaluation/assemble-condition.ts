@@ -53,7 +53,11 @@ function boltForCondition(
  * Since when it stands in its hole. One that was logged on the day it was set stands since it was logged; a
  * date known less well counts from its earliest day, which asks for a check rather than sparing one.
  */
-function standsSince({ installedOn, installedOnPrecision, createdAt }: BoltEntry["bolt"]): string | null {
+export function standsSince({
+  installedOn,
+  installedOnPrecision,
+  createdAt,
+}: BoltEntry["bolt"]): string | null {
   if (installedOn === null) return null;
   const logged = createdAt.toISOString();
   if (installedOnPrecision === "day" && logged.startsWith(installedOn)) return logged;
