@@ -42,10 +42,10 @@ function DemoAccountForm({
   return (
     <form {...form.formProps} className="grid gap-2 py-2">
       <input type="hidden" name="email" value={account.email} />
-      <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
+      <div className="flex items-center justify-between gap-4">
         <span className="grid min-w-0">
           <span className="font-semibold">{account.name}</span>
-          <span className="type-code text-sm break-all text-muted">{account.email}</span>
+          <Address email={account.email} />
         </span>
         <SubmitButton tone="secondary" pending={form.pending} pendingLabel="Signing in…">
           Enter<span className="sr-only"> as {account.name}</span>
@@ -53,5 +53,17 @@ function DemoAccountForm({
       </div>
       <ErrorSummary problems={form.problems} title="Not signed in" />
     </form>
+  );
+}
+
+/** Breaks before the host where there is no room for both. */
+function Address({ email }: { email: string }) {
+  const at = email.indexOf("@");
+  return (
+    <span className="type-code text-sm text-muted">
+      {email.slice(0, at)}
+      <wbr />
+      {email.slice(at)}
+    </span>
   );
 }

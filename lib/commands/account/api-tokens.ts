@@ -15,7 +15,10 @@ const HINT_LENGTH = 6;
  * Makes a token for a program. It is shown this once; a second send of the same id cannot show it again and
  * is refused as a conflict.
  */
-export async function createApiToken(ctx: CommandContext, input: CreateTokenInput): Promise<{ token: string }> {
+export async function createApiToken(
+  ctx: CommandContext,
+  input: CreateTokenInput,
+): Promise<{ token: string }> {
   const { userId } = requireSelf(ctx.actor);
   const { now } = ctx;
   return inTransaction(ctx.db, async (tx) => {
