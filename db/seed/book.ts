@@ -185,7 +185,7 @@ export class Book {
 }
 
 /** The evening it was placed, or the opening of the register for what was there before. */
-export function recordedOn(bolt: BoltSpec): Date {
+function recordedOn(bolt: BoltSpec): Date {
   const placed = bolt.when === null ? REGISTER_OPENED : eveningOf(bolt.when.on);
   return placed < REGISTER_OPENED ? REGISTER_OPENED : placed;
 }

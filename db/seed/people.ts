@@ -3,9 +3,9 @@ import type { memberships, users } from "@/db/schema";
 import type { Ids } from "@/db/seed/ids";
 
 /** Printed on the demo's sign-in page; a real installation has no such accounts. */
-export const DEMO_PASSWORD = "tarrow-demo-2026";
+const DEMO_PASSWORD = "tarrow-demo-2026";
 
-export const DEMO_PEOPLE = ["admin", "steward", "bolter", "rigger", "visitor"] as const;
+const DEMO_PEOPLE = ["admin", "steward", "bolter", "rigger", "visitor"] as const;
 export type DemoPerson = (typeof DEMO_PEOPLE)[number];
 export type PersonIds = Readonly<Record<DemoPerson, string>>;
 

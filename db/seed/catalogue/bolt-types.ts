@@ -1,9 +1,7 @@
 import { PLATED_TYPES, SCREW_TYPES, STUD_TYPES } from "@/db/seed/catalogue/mechanical-types";
 import { EYE_TYPES } from "@/db/seed/catalogue/eye-types";
 import { GLUED_STUD_TYPES, ROD_TYPES } from "@/db/seed/catalogue/glued-types";
-import type { boltTypes } from "@/db/schema";
-
-export type BoltType = Omit<typeof boltTypes.$inferInsert, "id">;
+import type { BoltType } from "@/db/seed/catalogue/bolt-type";
 
 /** The hardware found on the island, by generic name. */
 export const BOLT_TYPES = {

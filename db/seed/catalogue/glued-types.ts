@@ -1,4 +1,4 @@
-import type { BoltType } from "@/db/seed/catalogue/bolt-types";
+import type { BoltType } from "@/db/seed/catalogue/bolt-type";
 
 const RATED = "Rating as a maker would print it, illustrative.";
 const BENCH = "Onset from pulls across three pieces on a bench, illustrative.";

@@ -3,7 +3,7 @@ import { ISLAND_CENTRE, islandShore, isInside, isletShore, rounded, toShoreM } f
 import { azimuthDeg, distanceM, offset, step, walk } from "@/db/seed/island/frame";
 
 /** A stretch of shore that is nearly straight: a point on it and the direction away from the water. */
-export interface Strand {
+interface Strand {
   at: LonLat;
   inlandDeg: number;
 }
@@ -26,7 +26,7 @@ export interface Places {
 
 /** The line on Pillar Stack is 96 m: this far from the rim's shore to its mainland anchor, the rest across the water. */
 export const RIM_ANCHOR_INLAND_M = 14;
-export const STACK_ANCHOR_FROM_CENTRE_M = 12;
+const STACK_ANCHOR_FROM_CENTRE_M = 12;
 export const STACK_SPAN_M = 96;
 const STACK_RADIUS_M = 30;
 

@@ -13,7 +13,7 @@ const LOCALS = { remembered: "Fellgate locals" };
 export const WARNED_GLUE = "polyester";
 export const WARNED_BATCH = "PE-1806";
 export const WARNED_DAY = "2018-06-23";
-export const COLD_GLUE_NOTE =
+const COLD_GLUE_NOTE =
   "Rock at 4 °C, the glue's table starts at 5 °C. Left for a week, then pulled to 8 kN along the axis: held.";
 
 /** Granite in the rain: single pitches on the slabs, two-pitch lines on the right. */
