@@ -33,20 +33,11 @@ export function enterReports(book: Book): void {
 
 function enterSighting(book: Book, sighting: Sighting): void {
   const anchor = book.anchorNamed(sighting.anchor);
-  const placement = anchor.placements.find(({ number }) => number === sighting.placement);
-  const boltId = sighting.formerBolt ? placement?.chain.at(-2) : placement?.boltId;
+  const subject = subjectOf(book, anchor, sighting);
   const observedAt = book.calendar.instantAgo(sighting.daysAgo, 10);
-  const [answeredDaysAgo, how] = sighting.answered ?? [];
-  const beside = sighting.nearby;
-  const at = book.anchors.find(({ id }) => id === anchor.id)?.point;
   enterReport(book, anchor, {
     by: sighting.by,
-    // A point of its own stands instead of the anchor it was seen from.
-    ...(beside && at ? { anchorId: null, point: offset(at, beside) } : {}),
-    placementId: placement?.id ?? null,
-    boltId: boltId ?? null,
-    fittingId: sighting.fitting ? (anchor.fittingIds[0] ?? null) : null,
-    spanId: book.spans.find(({ name }) => name === sighting.span)?.id ?? null,
+    ...subject,
     kind: sighting.kind,
     depth: sighting.depth,
     observedAt,
@@ -54,18 +45,37 @@ function enterSighting(book: Book, sighting: Sighting): void {
     grade: sighting.grade ?? null,
     note: sighting.note,
     tookOutOfUse: sighting.tookOutOfUse ?? false,
-    ...(answeredDaysAgo === undefined
-      ? { state: "open" }
-      : {
-          state: "handled",
-          handledAt: book.calendar.instantAgo(answeredDaysAgo, 18),
-          handledBy: book.people.steward,
-          handledHow: how ?? null,
-        }),
+    ...answerOf(book, sighting),
   });
   if (sighting.tookOutOfUse && sighting.answered === undefined) {
-    takeOut(book, anchor.id, boltId ?? null, observedAt);
+    takeOut(book, anchor.id, subject.boltId ?? null, observedAt);
   }
+}
+
+/** What it is about: a bolt, a fitting, a line, or a point beside the anchor it was seen from. */
+function subjectOf(book: Book, anchor: Entered, sighting: Sighting): Partial<ReportRow> {
+  if (sighting.nearby) {
+    const from = book.anchors.find(({ id }) => id === anchor.id)?.point;
+    return { anchorId: null, point: from && offset(from, sighting.nearby) };
+  }
+  if (sighting.fitting) return { fittingId: anchor.fittingIds[0] };
+  if (sighting.span) return { spanId: book.spans.find(({ name }) => name === sighting.span)?.id };
+  const placement = anchor.placements.find(({ number }) => number === sighting.placement);
+  return {
+    placementId: placement?.id,
+    boltId: sighting.formerBolt ? placement?.chain.at(-2) : placement?.boltId,
+  };
+}
+
+function answerOf(book: Book, { answered }: Sighting): Partial<ReportRow> {
+  if (answered === undefined) return { state: "open" };
+  const [daysAgo, how] = answered;
+  return {
+    state: "handled",
+    handledAt: book.calendar.instantAgo(daysAgo, 18),
+    handledBy: book.people.steward,
+    handledHow: how,
+  };
 }
 
 function enterReport(
