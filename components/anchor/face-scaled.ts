@@ -20,7 +20,7 @@ import {
 const SIDE = 40;
 const TOP = 92;
 const BOTTOM = 66;
-const MOST_HEIGHT = 560;
+const MOST_HEIGHT = 520;
 /** Even a pair of bolts is drawn within half a metre of rock, so that two anchors can be compared by eye. */
 const LEAST_EXTENT_MM = 620;
 

@@ -38,7 +38,7 @@ export function ErrorSummary({
             ) : (
               <a
                 href={`#${problem.path}`}
-                className="inline-block py-1 underline underline-offset-2"
+                className="touch inline-flex items-center underline underline-offset-2"
                 onClick={focusField}
               >
                 {problem.message}
