@@ -162,10 +162,14 @@ export const moveAnchorInput = z
   .meta({ id: "AnchorMove" });
 export type MoveAnchorInput = z.output<typeof moveAnchorInput>;
 
-/** What `PATCH /anchors/{id}` takes: facts, or a move, or both. */
+/** What `PATCH /anchors/{id}` takes: facts, or a move. */
 export const anchorPatch = anchorChange
   .extend({ move: moveAnchorInput.optional() })
   .refine((value) => Object.keys(value).length > 0, "Nothing to change was sent.")
+  .refine((value) => value.move === undefined || Object.keys(value).length === 1, {
+    path: ["move"],
+    message: "Move it in a call of its own.",
+  })
   .meta({ id: "AnchorPatch" });
 
 export const createSpanInput = z

@@ -42,6 +42,7 @@ export const jobAction = z
     "One of decide, assign, move, complete is wanted here.",
   )
   .meta({ id: "ReboltJobAction" });
+export type JobActionInput = z.output<typeof jobAction>;
 export type DecideJobInput = z.output<typeof decide>;
 export type AssignJobInput = z.output<typeof assign>;
 export type MoveJobInput = z.output<typeof move>;

@@ -73,5 +73,3 @@ export const decideConditionInput = z.strictObject({
   reason: text(1000, 3),
 });
 export type DecideConditionInput = z.output<typeof decideConditionInput>;
-
-export const photoFields = z.strictObject({ id, caption: note(300).default("") });

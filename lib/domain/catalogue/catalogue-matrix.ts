@@ -33,14 +33,8 @@ const MECHANICAL_DEPTHS = 5;
 
 /** The verdict on a type, placed new and as deep as EN 959 wants, for every use and kind of place. */
 export function catalogueMatrix(type: CatalogueType, policy: LoadPolicy, onDate: string): CatalogueMatrix {
-  const embedmentMm = depthOf(type);
-  const bolt: WhatIfBolt = {
-    ...type,
-    embedmentMm,
-    method: type.allowedMethods[0] ?? null,
-    installedOn: onDate,
-    installedOnPrecision: "day",
-  };
+  const bolt = placedNew(type, onDate);
+  const { embedmentMm = null } = bolt;
   const cells = USES.flatMap((use) =>
     placeKinds.map(({ key, place }): MatrixCell => {
       const { verdict, findings } = whatIf({ use, bolt, place, rock: { ucsMpa: ROCK_MPA }, onDate }, policy);
@@ -55,6 +49,17 @@ export function catalogueMatrix(type: CatalogueType, policy: LoadPolicy, onDate:
       "placed new on the date asked for",
       "one bolt carries all",
     ],
+  };
+}
+
+/** The type as a bolt set on that day, as deep as the standard wants and by the first method it allows. */
+export function placedNew(type: CatalogueType, onDate: string): WhatIfBolt {
+  return {
+    ...type,
+    embedmentMm: depthOf(type),
+    method: type.allowedMethods[0] ?? null,
+    installedOn: onDate,
+    installedOnPrecision: "day",
   };
 }
 
