@@ -11,8 +11,8 @@ export const SWITCH_YEARS = 20;
  *
  *   r  loss in the first year, m/yr    t  years    b  0.523 carbon steel, 0.813 zinc (upper: 0.575, 0.873)
  *
- * Not for: pitting, the crevice under a hanger, mixed metals and stress corrosion. They take little or no section
- * before they break a bolt, and give no warning that this formula could see.
+ * Not for: pitting, the crevice under a hanger, mixed metals and stress corrosion. They take little or no
+ * section before they break a bolt, and give no warning that this formula could see.
  *
  * Source: ISO 9224:2012 (form and exponents from memory), ISO 9223:2012 for r.
  * Worked example (also a test): steel in C3, upper end 50 µm, 20 years: 239.6 µm.

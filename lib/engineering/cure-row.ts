@@ -13,11 +13,11 @@ export interface CureRow {
  * The row of an adhesive's cure table that applies at a temperature, or null: do not install.
  *
  * The table is a staircase. Between two rows the colder one applies; below the first there is no row. Never
- * interpolated, never extrapolated: the maker tested the steps and nothing else. The temperature to ask with is
- * the colder of glue or air and rock. Rows may come in any order.
+ * interpolated, never extrapolated: the maker tested the steps and nothing else. The temperature to ask
+ * with is the colder of glue or air and rock. Rows may come in any order.
  *
- * Source: the product sheet of the adhesive; reading it as steps is common practice and what the sheets ask for.
- * Worked example (also a test): rows at 0 °C and 5 °C, asked at 4.9 °C: the row of 0 °C.
+ * Source: the product sheet of the adhesive; reading it as steps is common practice and what the sheets ask
+ * for. Worked example (also a test): rows at 0 °C and 5 °C, asked at 4.9 °C: the row of 0 °C.
  *
  * @throws RangeError when the temperature or a row's temperature is not finite.
  */

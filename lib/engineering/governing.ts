@@ -7,15 +7,14 @@ const TRUST: Readonly<Record<Source, number>> = { test: 0, rating: 1, estimate: 
 /**
  * Which capacity decides for a demand.
  *
- * Two steps. Within each mode the best-trusted source speaks and silences the others: test > rating > estimate;
- * of several with the same trust, the lowest. Between modes the lowest capacity along the direction of the
- * demand governs, that is the largest u^(1/a) (see `utilisation`): modes with different exponents cannot be
- * compared by u itself.
- * A rating for breaking therefore never silences an estimate for bending: they answer different questions, and
- * an estimate may lower what is said.
+ * Two steps. Within each mode the best-trusted source speaks and silences the others: test > rating >
+ * estimate; of several with the same trust, the lowest. Between modes the lowest capacity along the
+ * direction of the demand governs, that is the largest u^(1/a) (see `utilisation`): modes with different
+ * exponents cannot be compared by u itself. A rating for breaking therefore never silences an estimate for
+ * bending: they answer different questions, and an estimate may lower what is said.
  *
- * Worked example (also a test): a rating of 25 kN and an estimate of 39 kN for breaking, an onset of 4 kN from a
- * test; 5 kN across: bend onset governs at 1.25.
+ * Worked example (also a test): a rating of 25 kN and an estimate of 39 kN for breaking, an onset of 4 kN
+ * from a test; 5 kN across: bend onset governs at 1.25.
  *
  * @throws RangeError when the list is empty, or as `utilisation` does.
  */

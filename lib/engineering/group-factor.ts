@@ -11,9 +11,10 @@ interface Edges {
 /**
  * How much of its lone-bolt cone each bolt of a group still has, from spacing and free edges.
  *
- * Each bolt breaks out a square of side 3 h around itself; overlaps count once; an edge cuts what lies beyond it.
+ * Each bolt breaks out a square of side 3 h around itself; overlaps count once; an edge cuts what lies
+ * beyond it.
  *
- *     areaRatio     = area of the union / 9 h²                       1 for one bolt far from an edge, n for n apart
+ *     areaRatio     = area of the union / 9 h²       1 for one bolt far from an edge, n for n apart
  *     psiEdge       = 0.7 + 0.3 c / (1.5 h) <= 1                     c: nearest distance of a bolt to an edge
  *     perBoltFactor = areaRatio psiEdge / n                          equal shares of the group
  *

@@ -10,10 +10,12 @@ export const UCS_CAP_PA = 55e6;
  *     N = k √f h^1.5 ψ        N in newton, f in MPa, h in mm: the formula is dimensional
  *
  *   h  effective depth    f  min(UCS, 55 MPa): the formula is calibrated on concrete
- *   k  7.7, the cracked-concrete level    ψ  quality: 1 massive, 0.5 default, 0.3 or less jointed, weathered, soft
+ *   k  7.7, the cracked-concrete level
+ *   ψ  quality: 1 massive, 0.5 default, 0.3 or less jointed, weathered, soft
  *
- * No code covers anchors in rock. The doubt is -50/+100 % (`lowN`, `highN`), and one joint behind the bolt makes it
- * worthless: it may lower a verdict, never raise one. `radialN` is null: a cone does not limit a sideways pull.
+ * No code covers anchors in rock. The doubt is -50/+100 % (`lowN`, `highN`), and one joint behind the bolt
+ * makes it worthless: it may lower a verdict, never raise one. `radialN` is null: a cone does not limit a
+ * sideways pull.
  *
  * Source: EN 1992-4 (k from memory); the form as in ACI 318-19 (published).
  * Worked example (also a test): 80 mm, UCS 40 MPa, ψ 0.5: 17.4 kN.

@@ -15,16 +15,16 @@ import { requireCount, requireNotNegative, requirePositive } from "./guard";
  *   n  rods that share it         φ  fixity: depth of crushed rock or glue, in diameters
  *   A  π d²/4, W  π d³/32         α  1 free head, 2 a head that cannot rotate
  *
- * Onset is a range: low = elastic (My) with φ 0.5, high = plastic (Mp) with φ 0; a φ that is given applies to
- * both ends. `radialN` is the low end. Breaking starts as lever-arm rupture (low, `radialN`); once bent, the rods
- * swing into tension and tend to the shear value (high).
+ * Onset is a range: low = elastic (My) with φ 0.5, high = plastic (Mp) with φ 0; a φ that is given applies
+ * to both ends. `radialN` is the low end. Breaking starts as lever-arm rupture (low, `radialN`); once bent,
+ * the rods swing into tension and tend to the shear value (high).
  *
  * What it says: onset goes with d³ fy / e. From 8 to 10 mm rod doubles it, from 15 to 30 mm lever halves it.
  * Rods welded side by side, or loaded in their common plane, are stiffer: a bonus, not assumed.
  * Not for: plates, forged eyes, cracked or corroded rods.
  *
- * Source: section statics; shear with a lever arm in the form of EN 1992-4 (la = e + 0.5 d, M = 1.2 W fu; from
- * memory). Worked example (also a test): two 8 mm rods, fy 400 MPa, e 20 mm, φ 0: 2.01 to 3.41 kN.
+ * Source: section statics; shear with a lever arm in the form of EN 1992-4 (la = e + 0.5 d, M = 1.2 W fu;
+ * from memory). Worked example (also a test): two 8 mm rods, fy 400 MPa, e 20 mm, φ 0: 2.01 to 3.41 kN.
  *
  * @throws RangeError when a length, stress or count is out of range.
  */

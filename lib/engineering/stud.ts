@@ -11,9 +11,9 @@ import { requireNotNegative, requirePositive } from "./guard";
  *
  *   As  stress area of the thread, m²: π/4 (d - 0.9382 P)²      e  gap between rock and hanger, m
  *
- * What it says: an M10 A4-70 stud yields at 15.7 kN flush and at 2.0 kN with a 10 mm gap. A loose or spaced hanger
- * is an order-of-magnitude defect, not a cosmetic one. Flush means a gap of exactly 0.
- * Onset low = elastic, high = plastic (16/(3π) times the elastic moment), on the same lever.
+ * What it says: an M10 A4-70 stud yields at 15.7 kN flush and at 2.0 kN with a 10 mm gap. A loose or spaced
+ * hanger is an order-of-magnitude defect, not a cosmetic one. Flush means a gap of exactly 0. Onset low =
+ * elastic, high = plastic (16/(3π) times the elastic moment), on the same lever.
  *
  * Source: ISO 898-1 stress area (published); 0.6 for von Mises' 0.577, break factors and the lever form of
  * EN 1992-4 (from memory). Worked example (also a test): M10 A4-70 (fy 450 MPa, As 58 mm²) yields at 15.66 kN

@@ -1,8 +1,8 @@
 import { readFileSync } from "node:fs";
 
 /**
- * The worked cases of tests/fixtures/cases.json: each was computed by two independent methods before the code was
- * written (their names and the agreement stand in the file).
+ * The worked cases of tests/fixtures/cases.json: each was computed by two independent methods before the
+ * code was written (their names and the agreement stand in the file).
  */
 const file: unknown = JSON.parse(readFileSync(new URL("../fixtures/cases.json", import.meta.url), "utf8"));
 

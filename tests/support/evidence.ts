@@ -13,7 +13,10 @@ import type {
   PlacementFacts,
 } from "@/lib/domain/finding/evidence";
 
-/** Evidence for tests: an ordinary bolt with every fact on record, against which each test changes what it is about. */
+/**
+ * Evidence for tests: an ordinary bolt with every fact on record, against which each test changes what it
+ * is about.
+ */
 
 export const TODAY = "2026-06-01";
 

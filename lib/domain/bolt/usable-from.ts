@@ -13,8 +13,9 @@ export type UsableFrom =
 /**
  * When a glued bolt may be loaded: the install plus the cure time of the row its colder temperature falls in.
  *
- * The colder of glue (or air) and rock decides. Never between two rows, never below the first: there the glue is not to
- * be used and this refuses. Without both temperatures, or without a table, it refuses too: a guess is not a time.
+ * The colder of glue (or air) and rock decides. Never between two rows, never below the first: there the
+ * glue is not to be used and this refuses. Without both temperatures, or without a table, it refuses too: a
+ * guess is not a time.
  */
 export function usableFrom(i: {
   /** UTC instant at which the bolt was set. */

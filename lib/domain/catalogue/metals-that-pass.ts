@@ -5,8 +5,8 @@ import { everyPlace } from "@/lib/domain/finding/place";
 import { list } from "@/lib/domain/finding/words";
 
 /**
- * The metals a bolt in this place may be of, in words: those that reach its class and cannot be expected to crack, at
- * every value a fact that is not known may have. Titanium is named once.
+ * The metals a bolt in this place may be of, in words: those that reach its class and cannot be expected to
+ * crack, at every value a fact that is not known may have. Titanium is named once.
  */
 export function metalsThatPass(facts: PlaceFacts): string {
   const places = everyPlace(facts);

@@ -23,7 +23,9 @@ function kind(key: string, label: string, seaDistanceM: number, washing: "rain" 
   };
 }
 
-/** The kinds of place a type is held against, mildest first. Sheltered: neither rain nor a regime washes it. */
+/**
+ * The kinds of place a type is held against, mildest first. Sheltered: neither rain nor a regime washes it.
+ */
 export const placeKinds: readonly PlaceKind[] = [
   kind("inland_washed", "Inland, washed by rain", 50_000, "rain"),
   kind("inland_sheltered", "Inland, sheltered", 50_000, "none"),

@@ -68,10 +68,11 @@ interface Found {
 /**
  * The condition of an anchor and of each of its bolts, from what is open against them.
  *
- * A bolt with a permanent bend, moving glue, cracked metal or a new, moving or hollow crack is out of use until that report is
- * answered. Every bolt that stood there then carried the same event: the whole anchor is out of use until each of them
- * was checked by hand afterwards. Then the anchor is as its worst bolt, except that with enough sound main bolts for every
- * use it is "check first" instead of out of use. A tag's report nobody confirmed means "check first".
+ * A bolt with a permanent bend, moving glue, cracked metal or a new, moving or hollow crack is out of use
+ * until that report is answered. Every bolt that stood there then carried the same event: the whole anchor
+ * is out of use until each of them was checked by hand afterwards. Then the anchor is as its worst bolt,
+ * except that with enough sound main bolts for every use it is "check first" instead of out of use. A tag's
+ * report nobody confirmed means "check first".
  */
 export function deriveCondition(anchor: AnchorForCondition, policy: LoadPolicy): AnchorCondition {
   const events = eventsOf(anchor);
@@ -212,8 +213,8 @@ function withBoltsOut(
 }
 
 /**
- * Lays a steward's decision beside the evidence. What is out of use by evidence comes back through evidence only; otherwise the
- * decision holds until something newer is seen, from then on the worse of the two.
+ * Lays a steward's decision beside the evidence. What is out of use by evidence comes back through evidence
+ * only; otherwise the decision holds until something newer is seen, from then on the worse of the two.
  */
 function settle({ derived, why, outOfUseSince, newest }: Found, decided: Decision | null): DerivedCondition {
   const beside = { derived, decided: decided?.condition ?? null, why, outOfUseSince };

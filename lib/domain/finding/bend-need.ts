@@ -4,7 +4,9 @@ import { onBolt } from "@/lib/domain/finding/loads";
 import { isSerious } from "@/lib/domain/finding/traits";
 import { atLeastKn, ratio } from "@/lib/domain/finding/words";
 
-/** Least radial bend onset any bolt should have, kN (common practice): below it ordinary use bends the bolt. */
+/**
+ * Least radial bend onset any bolt should have, kN (common practice): below it ordinary use bends the bolt.
+ */
 export const LEAST_ONSET_KN = 3;
 /** Margin a serious use wants between the peak and bend onset (common practice). */
 export const SERIOUS_MARGIN = 1.5;
@@ -33,7 +35,10 @@ export function bendNeeds(e: BoltEvidence, loads: Loads): readonly BendNeed[] {
   return [loads.working, ...peaks].map((load) => ({ load, factor: 1 }));
 }
 
-/** Linear interaction of a case on one bolt with a bend onset: 1 is the onset. A part not known does not count. */
+/**
+ * Linear interaction of a case on one bolt with a bend onset: 1 is the onset. A part not known does not
+ * count.
+ */
 export function bendUse(
   load: LoadCase,
   share: number,
@@ -44,8 +49,8 @@ export function bendUse(
 }
 
 /**
- * The least radial bend onset at which nothing would be said, kN; null when no radial onset helps, because the pull along
- * the axis alone is too much.
+ * The least radial bend onset at which nothing would be said, kN; null when no radial onset helps, because
+ * the pull along the axis alone is too much.
  */
 export function neededOnsetKn(e: BoltEvidence, loads: Loads, axialOnsetKn: number | null): number | null {
   let needed = isSerious(e.use) ? 0 : LEAST_ONSET_KN;

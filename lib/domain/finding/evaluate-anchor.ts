@@ -112,7 +112,10 @@ function better(a: HelpMost | null, b: HelpMost | null): HelpMost | null {
   return b.settles > a.settles ? b : a;
 }
 
-/** The fact named most often, weighed by what it settles; an anchor's own open question speaks when no bolt asks. */
+/**
+ * The fact named most often, weighed by what it settles; an anchor's own open question speaks when no bolt
+ * asks.
+ */
 function mostHelpful(bolts: readonly AnchorBoltVerdict[], own: readonly UsedFinding[]): HelpMost | null {
   const sums = new Map<string, HelpMost>();
   for (const { helpMost } of bolts) {

@@ -16,7 +16,10 @@ export interface BoltVerdict {
   engine: string;
   /** Worst first. */
   findings: readonly Finding[];
-  /** Greatest part of a strength or bend onset used up with one bolt carrying all; null: none could be computed. */
+  /**
+   * Greatest part of a strength or bend onset used up with one bolt carrying all; null: none could be
+   * computed.
+   */
   utilisation: number | null;
   /** What the place asks of stainless steel; null: the distance to the sea is not known and matters. */
   placeClass: PlaceClass | null;

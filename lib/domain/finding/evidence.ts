@@ -62,7 +62,10 @@ export interface BoltFacts {
 
 export interface PlaceFacts {
   seaDistanceM: number | null;
-  /** Half-width of the doubt about it; the careful side of it counts near a threshold. 0 when typed into a what-if. */
+  /**
+   * Half-width of the doubt about it; the careful side of it counts near a threshold. 0 when typed into a
+   * what-if.
+   */
   seaDistanceErrorM: number;
   coast: Coast;
   washing: Washing | null;
@@ -96,7 +99,10 @@ export interface WarningFacts {
   warningId: string;
   title: string;
   says: "stop" | "inspect";
-  /** exact: everything matches. batch_unknown: all but the batch, which is not recorded. related: same batch, metal or microclimate as one that failed. */
+  /**
+   * exact: everything matches. batch_unknown: all but the batch, which is not recorded. related: same
+   * batch, metal or microclimate as one that failed.
+   */
   match: "exact" | "batch_unknown" | "related";
 }
 

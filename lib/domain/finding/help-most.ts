@@ -124,8 +124,8 @@ const OTHERWISE: Partial<Record<RuleCode, { fact: string; label: string }>> = {
 };
 
 /**
- * The missing fact that settles most of the open questions, found by trying its plausible values and counting, on average, how
- * many questions are no longer asked. Null: nothing is open.
+ * The missing fact that settles most of the open questions, found by trying its plausible values and
+ * counting, on average, how many questions are no longer asked. Null: nothing is open.
  */
 export function helpMost(e: BoltEvidence, findings: readonly Finding[], policy: LoadPolicy): HelpMost | null {
   const open = findings.filter((found) => found.level === "ask").map((found) => found.code);

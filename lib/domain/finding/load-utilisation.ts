@@ -7,9 +7,10 @@ import { bendOnsetOf, ratedOf } from "@/lib/domain/finding/strengths";
 import { isSerious } from "@/lib/domain/finding/traits";
 
 /**
- * How far the loads of a use go towards breaking or bending the bolt, with one bolt carrying all: 1 is the limit. Bending counts at
- * the peak in a serious use and at the working case elsewhere; an estimate with its friendly end, so that it never
- * looks worse than a number somebody measured. Null: neither strength nor onset is known, or no load applies.
+ * How far the loads of a use go towards breaking or bending the bolt, with one bolt carrying all: 1 is the
+ * limit. Bending counts at the peak in a serious use and at the working case elsewhere; an estimate with
+ * its friendly end, so that it never looks worse than a number somebody measured. Null: neither strength
+ * nor onset is known, or no load applies.
  */
 export function loadUtilisation(e: BoltEvidence, policy: LoadPolicy): number | null {
   const loads = loadsOf(e, policy);

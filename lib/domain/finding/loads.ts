@@ -30,8 +30,8 @@ const BELAY_OUTWARD_KN = 5;
 
 /**
  * The load cases of a use with the bounds of sharing, or null for a bolt that carries no load of the use.
- * Choosing a type, protection, directionals and rows: one bolt carries all. The extra cases of a belay belong to
- * the area's policy; typed loads replace the whole set.
+ * Choosing a type, protection, directionals and rows: one bolt carries all. The extra cases of a belay
+ * belong to the area's policy; typed loads replace the whole set.
  */
 export function loadsOf(e: BoltEvidence, policy: LoadPolicy): Loads | null {
   if (!carriesLoad(e)) return null;

@@ -15,9 +15,10 @@ export interface StandingReport {
 /**
  * The open reports that count, worst first, older first among equals.
  *
- * What takes a bolt out of use, and a bolt reported missing, counts until it is answered. Everything else is ordered by when it
- * was observed: a newer routine check that found nothing, made at least as close up, supersedes it. A report through a
- * tag without an account is not proof: what would stop asks until a member confirms it.
+ * What takes a bolt out of use, and a bolt reported missing, counts until it is answered. Everything else
+ * is ordered by when it was observed: a newer routine check that found nothing, made at least as close up,
+ * supersedes it. A report through a tag without an account is not proof: what would stop asks until a
+ * member confirms it.
  */
 export function standingReports(reports: readonly OpenReportFacts[]): readonly StandingReport[] {
   return reports

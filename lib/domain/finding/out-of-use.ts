@@ -1,9 +1,10 @@
 import type { OpenReportFacts } from "@/lib/domain/finding/evidence";
 
 /**
- * Whether what a report says takes the bolt and its anchor out of use the moment it is filed: a permanent bend, a moving
- * glue-in, cracked metal, or a new, moving or hollow rock crack. A deformation whose angle was not measured counts as
- * a bend. Who may do so at once (`confirmed`) is for the caller: an unconfirmed one means "check first".
+ * Whether what a report says takes the bolt and its anchor out of use the moment it is filed: a permanent
+ * bend, a moving glue-in, cracked metal, or a new, moving or hollow rock crack. A deformation whose angle
+ * was not measured counts as a bend. Who may do so at once (`confirmed`) is for the caller: an unconfirmed
+ * one means "check first".
  */
 export function isOutOfUseAtOnce(
   report: Pick<

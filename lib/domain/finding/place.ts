@@ -23,7 +23,10 @@ export function placeOf(place: PlaceFacts): Place {
   };
 }
 
-/** Every place it may be: unknown distance and washing at each plausible value. One entry when both are known. */
+/**
+ * Every place it may be: unknown distance and washing at each plausible value. One entry when both are
+ * known.
+ */
 export function everyPlace(place: PlaceFacts): readonly Place[] {
   const known = placeOf(place);
   const distances = known.seaDistanceM === null ? PLAUSIBLE_SEA_M : [known.seaDistanceM];

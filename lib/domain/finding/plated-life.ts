@@ -6,7 +6,10 @@ import { isSome } from "@/lib/domain/finding/words";
 
 /** How zinc and then steel are used up: ISO 9223 rates at their upper end, ISO 9224 growth. */
 
-/** Corrosivity by distance to the sea where nobody measured it (common practice); µm in the first year, upper ends. */
+/**
+ * Corrosivity by distance to the sea where nobody measured it (common practice); µm in the first year,
+ * upper ends.
+ */
 const CATEGORIES = [
   { name: "CX", toM: 250, zincUm: 25, steelUm: 700 },
   { name: "C5", toM: 1_000, zincUm: 8.4, steelUm: 200 },
@@ -16,7 +19,10 @@ const INLAND = { name: "C3", zincUm: 2.1, steelUm: 50 } as const;
 const ZINC_EXPONENT = 0.813;
 const STEEL_EXPONENT = 0.523;
 
-/** Greatest age a plated bolt whose date is not known may have, years (common practice: drilled bolts since then). */
+/**
+ * Greatest age a plated bolt whose date is not known may have, years (common practice: drilled bolts since
+ * then).
+ */
 const OLDEST_YEARS = 60;
 /** Shanks in use where the diameter is not recorded, mm. */
 const PLAUSIBLE_SHANK_MM = [8, 12];
@@ -25,7 +31,10 @@ function categoryAt(seaM: number): { zincUm: number; steelUm: number } {
   return CATEGORIES.find(({ toM }) => seaM <= toM) ?? INLAND;
 }
 
-/** Coating, µm: as measured, else 8 for electroplate (BS 7371-3, published) and 50 for hot dip (common practice). */
+/**
+ * Coating, µm: as measured, else 8 for electroplate (BS 7371-3, published) and 50 for hot dip (common
+ * practice).
+ */
 export function coatingUm(bolt: BoltFacts, metal: string): number {
   return bolt.coatingThicknessUm ?? (metal === "hot-dip-galvanised" ? 50 : 8);
 }

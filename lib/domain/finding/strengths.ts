@@ -13,7 +13,10 @@ export interface Rated {
 /** EN 959:2018, 4.3.1 and 4.3.2: axial 15 kN, radial 25 kN (published). */
 export const EN_959 = { radialKn: 25, axialKn: 15 } as const;
 
-/** Numbers a claimed standard stands for: EN 959, and UIAA 123 with its stricter 20 kN axial; both published. */
+/**
+ * Numbers a claimed standard stands for: EN 959, and UIAA 123 with its stricter 20 kN axial; both
+ * published.
+ */
 function numbersOf(standard: string | null): { radialKn: number; axialKn: number; name: string } | null {
   if (standard === null) return null;
   if (/\bEN\s*959\b/i.test(standard)) return { ...EN_959, name: "EN 959" };
@@ -51,9 +54,9 @@ export interface BendOnset {
 const COLD_BENT_MPA = 400;
 
 /**
- * The bend onset on record, or an estimate where one can be made; null: neither.
- * A number of unknown basis is treated as an estimate. Estimates are made for glued bent rods alone, with metal, rod
- * diameter and lever known and two rods (a bent rod has two legs unless the record says otherwise).
+ * The bend onset on record, or an estimate where one can be made; null: neither. A number of unknown basis
+ * is treated as an estimate. Estimates are made for glued bent rods alone, with metal, rod diameter and
+ * lever known and two rods (a bent rod has two legs unless the record says otherwise).
  */
 export function bendOnsetOf(bolt: BoltFacts): BendOnset | null {
   const axial = axialOnset(bolt);
@@ -93,7 +96,10 @@ function axialOnset(bolt: BoltFacts): { axialKn: number | null; assumed: readonl
   };
 }
 
-/** Low: first yield at the table's strength, fixity half a diameter. High: whole section, cold-bent, fixity none. */
+/**
+ * Low: first yield at the table's strength, fixity half a diameter. High: whole section, cold-bent, fixity
+ * none.
+ */
 function estimateBentRod(bolt: BoltFacts): Omit<BendOnset, "axialKn" | "origin"> | null {
   const strength = strengthOf(bolt.metal);
   const { rodDiameterMm, leverMm } = bolt;

@@ -56,8 +56,8 @@ export function worstLevel(levels: readonly (Level | null)[]): Level | null {
 }
 
 /**
- * One level for a fact that is not known, from the level at each of its plausible values: the worst of them when all
- * lead to the same verdict, otherwise `ask`.
+ * One level for a fact that is not known, from the level at each of its plausible values: the worst of them
+ * when all lead to the same verdict, otherwise `ask`.
  */
 export function acrossUnknown(levels: readonly (Level | null)[]): Level | null {
   const worst = worstLevel(levels);

@@ -61,6 +61,11 @@ export function list(words: readonly string[]): string {
   return `${words.slice(0, -1).join(", ")} and ${words[words.length - 1] ?? ""}`;
 }
 
+/** "a and b are recorded": how a gap is closed. */
+export function areRecorded(words: readonly string[]): string {
+  return `${list(words)} ${words.length > 1 ? "are" : "is"} recorded`;
+}
+
 /** The same words with a capital first letter. */
 export function sentence(words: string): string {
   return words.charAt(0).toUpperCase() + words.slice(1);

@@ -48,8 +48,9 @@ const VISITS_FULL = 365;
 const DAY_MS = 86_400_000;
 
 /**
- * How soon a rebolt is wanted: a sum of six named parts, 100 at most. What is not known counts part of the way, never as
- * nothing. The weights are common practice; a steward may move an entry, and this sum stays visible beside it.
+ * How soon a rebolt is wanted: a sum of six named parts, 100 at most. What is not known counts part of the
+ * way, never as nothing. The weights are common practice; a steward may move an entry, and this sum stays
+ * visible beside it.
  */
 export function reboltPriority(input: PriorityInput): Priority {
   const parts = [

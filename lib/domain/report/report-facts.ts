@@ -1,7 +1,10 @@
 import type { OpenReportFacts } from "@/lib/domain/finding/evidence";
 import type { MeasuredValue } from "@/lib/domain/report/draft-report";
 
-/** A stored report as the rules want it: the measurements that decide, by name. The rust grade counts as a grade. */
+/**
+ * A stored report as the rules want it: the measurements that decide, by name. The rust grade counts as a
+ * grade.
+ */
 export function reportFacts(
   report: Pick<OpenReportFacts, "reportId" | "kind" | "depth" | "observedAt" | "grade" | "confirmed"> & {
     measured: Readonly<Record<string, MeasuredValue>>;

@@ -25,8 +25,8 @@ const METAL_CRACKED = yesNo("metalCracked", "Crack in the metal");
 const PLAY = number("playMm", "Play", "mm", 0, 30);
 
 /**
- * What each kind of report asks for. Bounds are what the hand can measure there: beyond them it is a slip of the pen. All of it may
- * be left out; a report filed with cold hands is worth more than one not filed.
+ * What each kind of report asks for. Bounds are what the hand can measure there: beyond them it is a slip
+ * of the pen. All of it may be left out; a report filed with cold hands is worth more than one not filed.
  */
 export const REPORT_MEASUREMENTS: Readonly<Record<ReportKind, readonly Measurement[]>> = {
   routine_check: [PLAY, grade("rustGrade", "Rust grade")],

@@ -70,7 +70,8 @@ describe("groupFactor", () => {
     expectClose(found.perBoltFactor * 3, output("groupFactor"));
   });
 
-  // ACI 318-19 design guide: 4 × 4 group, h 5.75 in, spacings 9 and 6 in, one edge at 8 in; recomputed within 0.03 %.
+  // ACI 318-19 design guide: 4 × 4 group, h 5.75 in, spacings 9 and 6 in, one edge at 8 in; recomputed
+  // within 0.03 %.
   it("reproduces the projected areas of the ACI 318-19 worked example", () => {
     const inch = 0.0254;
     const pointsM = [0, 1, 2, 3].flatMap((i) =>

@@ -49,7 +49,8 @@ describe("estimateRodEye", () => {
     );
   });
 
-  // Arithmetic on the EN 1992-4 form with M12 A4-70 (stress area 84.3 mm², ISO 898-1; Rm 700 MPa, ISO 3506-1).
+  // Arithmetic on the EN 1992-4 form with M12 A4-70 (stress area 84.3 mm², ISO 898-1; Rm 700 MPa, ISO
+  // 3506-1).
   it("breaks an M12 A4-70 at 9.16 kN on a lever of 10 mm", () => {
     const rodDiaM = Math.sqrt((4 * 84.27e-6) / Math.PI);
     const found = estimateRodEye({ rodDiaM, rods: 1, leverM: 0.01, fyPa: 450e6, fuPa: 700e6, fixityD: 0 });
@@ -125,7 +126,8 @@ describe("estimateStud", () => {
     expectClose(mode(found, "steel-break").radialN, output("radialBreakN"));
   });
 
-  // ISO 898-1, class 8.8: ultimate / proof load of M10 46.4 / 33.7 kN and M12 67.4 / 48.9 kN (stress area × 800 / 580).
+  // ISO 898-1, class 8.8: ultimate / proof load of M10 46.4 / 33.7 kN and M12 67.4 / 48.9 kN (stress area ×
+  // 800 / 580).
   it.each([
     ["M10", 58.0e-6, 800e6, 46_400],
     ["M10 proof", 58.0e-6, 580e6, 33_700],
@@ -147,7 +149,8 @@ describe("estimateStud", () => {
     expect(Math.abs(found - areaMm2)).toBeLessThanOrEqual(halfDigit);
   });
 
-  // ISO 3506-1: class 50 Rm 500, above which the shear factor of EN 1992-4 drops from 0.6 to 0.5 (from memory).
+  // ISO 3506-1: class 50 Rm 500, above which the shear factor of EN 1992-4 drops from 0.6 to 0.5 (from
+  // memory).
   it("takes the lower shear factor only above 500 MPa", () => {
     const shear = (fuPa: number) =>
       mode(estimateStud({ stressAreaM2: 58e-6, gapM: 0, fyPa: 210e6, fuPa }), "steel-break").radialN;

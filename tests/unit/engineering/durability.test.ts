@@ -69,7 +69,8 @@ describe("coatingLifeYears", () => {
     expect(found).toBeCloseTo(output("years"), 6);
   });
 
-  // ISO 9224 power law with its straight line from 20 years on (form from memory): 12 µm in C2, upper end 0.7 µm.
+  // ISO 9224 power law with its straight line from 20 years on (form from memory): 12 µm in C2, upper end
+  // 0.7 µm.
   it("gives 12 µm in C2 32.32 years, where the plain power law would give 32.96", () => {
     expect(coatingLifeYears({ thicknessM: 12e-6, firstYearM: 0.7e-6, exponent: 0.813 })).toBeCloseTo(
       32.32,

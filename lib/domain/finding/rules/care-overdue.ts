@@ -5,8 +5,9 @@ import { isSerious } from "@/lib/domain/finding/traits";
 import type { Finding } from "@/lib/domain/finding/types";
 
 /**
- * care.overdue: time since somebody had a hand on it. An install counts as a check, however well its date is known.
- * Never checked asks in a serious use and is a note elsewhere. The day an interval ends is still in time.
+ * care.overdue: time since somebody had a hand on it. An install counts as a check, however well its date
+ * is known. Never checked asks in a serious use and is a note elsewhere. The day an interval ends is still
+ * in time.
  */
 export function careOverdue(e: BoltEvidence, policy: LoadPolicy): Finding | null {
   if (e.context === "choosing") return null;

@@ -19,13 +19,14 @@ import { atMostKn, exceeds, kn } from "@/lib/domain/finding/words";
 /**
  * load.bend: does the bolt bend for good under the load expected here?
  *
- * Linear interaction of pull-out and pull across. A tested or maker's onset uses its low end: the careful side of a
- * scatter. An estimate has a low and a high end and is never a pass: at best it limits a serious use, and elsewhere it
- * leaves a note. Rope access stops a tested onset on its working case only, as people hang in it daily and its
- * peak is a rescue; an estimate is held against the peak like a highline's, since an estimate may only lower.
+ * Linear interaction of pull-out and pull across. A tested or maker's onset uses its low end: the careful
+ * side of a scatter. An estimate has a low and a high end and is never a pass: at best it limits a serious
+ * use, and elsewhere it leaves a note. Rope access stops a tested onset on its working case only, as people
+ * hang in it daily and its peak is a rescue; an estimate is held against the peak like a highline's, since
+ * an estimate may only lower.
  *
- * Bounds of sharing: every level is taken with one bolt carrying all. Only where that is a stop, the equal share is
- * asked too, and what it clears becomes "not known" (serious) or a limit (others).
+ * Bounds of sharing: every level is taken with one bolt carrying all. Only where that is a stop, the equal
+ * share is asked too, and what it clears becomes "not known" (serious) or a limit (others).
  */
 export function loadBend(e: BoltEvidence, policy: LoadPolicy): Finding | null {
   const loads = loadsOf(e, policy);
@@ -72,23 +73,39 @@ function withinBounds(e: BoltEvidence, loads: Loads, onset: BendOnset): Level | 
 
 function levelAt(e: BoltEvidence, loads: Loads, onset: BendOnset, share: number): Level | null {
   const peaks = loads.peaks.filter((load) => isSerious(e.use) || !load.strengthOnly);
-  const low = { radialKn: onset.lowKn, axialKn: onset.axialKn };
-  const high = { radialKn: onset.highKn, axialKn: onset.axialKn };
-  const peakUse = (end: typeof low) => Math.max(0, ...peaks.map((load) => bendUse(load, share, end)));
-  const workingUse = (end: typeof low) => bendUse(loads.working, share, end);
+  const usedBy = (radialKn: number) => {
+    const end = { radialKn, axialKn: onset.axialKn };
+    return {
+      peak: Math.max(0, ...peaks.map((load) => bendUse(load, share, end))),
+      working: bendUse(loads.working, share, end),
+    };
+  };
+  const low = usedBy(onset.lowKn);
+  return onset.basis === "estimate"
+    ? levelOfEstimate(e, low, usedBy(onset.highKn))
+    : levelOfKnown(e, low, onset.lowKn);
+}
 
-  if (onset.basis === "estimate") {
-    if (!isSerious(e.use)) return exceeds(workingUse(high), 1) ? "limit" : "note";
-    if (exceeds(peakUse(high), 1)) return "stop";
-    return exceeds(peakUse(low), 1) ? "ask" : "limit";
-  }
+/** Parts of an onset used up by the greatest peak that counts and by the working case. */
+interface Used {
+  peak: number;
+  working: number;
+}
+
+function levelOfEstimate(e: BoltEvidence, low: Used, high: Used): Level {
+  if (!isSerious(e.use)) return exceeds(high.working, 1) ? "limit" : "note";
+  if (exceeds(high.peak, 1)) return "stop";
+  return exceeds(low.peak, 1) ? "ask" : "limit";
+}
+
+function levelOfKnown(e: BoltEvidence, used: Used, onsetKn: number): Level | null {
   if (isSerious(e.use)) {
-    if (exceeds(e.use === "rope_access" ? workingUse(low) : peakUse(low), 1)) return "stop";
-    return exceeds(SERIOUS_MARGIN * peakUse(low), 1) ? "limit" : null;
+    if (exceeds(e.use === "rope_access" ? used.working : used.peak, 1)) return "stop";
+    return exceeds(SERIOUS_MARGIN * used.peak, 1) ? "limit" : null;
   }
-  if (onset.lowKn < LEAST_ONSET_KN) return "stop";
-  if (exceeds(workingUse(low), 1)) return "limit";
-  return exceeds(peakUse(low), 1) ? "note" : null;
+  if (exceeds(LEAST_ONSET_KN, onsetKn)) return "stop";
+  if (exceeds(used.working, 1)) return "limit";
+  return exceeds(used.peak, 1) ? "note" : null;
 }
 
 /** The case shown: what the use is stopped on. */

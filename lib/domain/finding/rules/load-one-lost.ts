@@ -10,9 +10,10 @@ const ENOUGH_WITHOUT_GEOMETRY = 3;
 /**
  * load.one-lost: what is left when one placement goes.
  *
- * Every placement that can take the load counts, main or backup, bolt or tree: a backup is there for exactly this.
- * Protection, directionals and rows are single by nature and have the next bolt below. How the survivors share after a
- * loss is computed from the geometry where there is one; here stand the cases that need no computing.
+ * Every placement that can take the load counts, main or backup, bolt or tree: a backup is there for
+ * exactly this. Protection, directionals and rows are single by nature and have the next bolt below. How
+ * the survivors share after a loss is computed from the geometry where there is one; here stand the cases
+ * that need no computing.
  */
 export function loadOneLost(e: AnchorQuestion, policy: LoadPolicy): Finding | null {
   const { mainCount, backupCount, hasGeometry } = e.group;

@@ -23,9 +23,10 @@ const TITLES: Readonly<Record<Level, string>> = {
 /**
  * load.strength: does the bolt break under the load expected here?
  *
- * Steel interaction (exponent 2), taken as the factor sqrt(sum): it grows in step with the load, so the margins mean what
- * they say. Levels are taken with one bolt carrying all; a stop that an equal share would clear becomes "not known"
- * (serious) or a limit (others). A rating that is missing is for `load.unknown` to say.
+ * Steel interaction (exponent 2), taken as the factor sqrt(sum): it grows in step with the load, so the
+ * margins mean what they say. Levels are taken with one bolt carrying all; a stop that an equal share would
+ * clear becomes "not known" (serious) or a limit (others). A rating that is missing is for `load.unknown`
+ * to say.
  */
 export function loadStrength(e: BoltEvidence, policy: LoadPolicy): Finding | null {
   const loads = loadsOf(e, policy);

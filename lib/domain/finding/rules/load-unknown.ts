@@ -4,17 +4,19 @@ import { neededOnsetInWords } from "@/lib/domain/finding/bend-need";
 import type { BoltEvidence } from "@/lib/domain/finding/evidence";
 import type { Loads } from "@/lib/domain/finding/loads";
 import { loadsOf, onBolt } from "@/lib/domain/finding/loads";
+import type { Rated } from "@/lib/domain/finding/strengths";
 import { bendOnsetOf, ratedOf } from "@/lib/domain/finding/strengths";
 import { isSerious, worstLevel } from "@/lib/domain/finding/traits";
 import type { Finding } from "@/lib/domain/finding/types";
-import { list, sentence } from "@/lib/domain/finding/words";
+import { list } from "@/lib/domain/finding/words";
 
 /**
  * load.unknown: what the load rules could not compare.
  *
- * A rating counts as known when the record or a claimed standard gives it. The axial one is asked for only where the pull
- * has a part along the axis. No onset at all asks in a serious use, limits a belay on a bent rod (the build that
- * bends first), and is a note elsewhere: most plate hangers have no published onset and need none there.
+ * A rating counts as known when the record or a claimed standard gives it. The axial one is asked for only
+ * where the pull has a part along the axis. No onset at all asks in a serious use, limits a belay on a bent
+ * rod (the build that bends first), and is a note elsewhere: most plate hangers have no published onset and
+ * need none there.
  */
 export function loadUnknown(e: BoltEvidence, policy: LoadPolicy): Finding | null {
   const loads = loadsOf(e, policy);
@@ -24,24 +26,20 @@ export function loadUnknown(e: BoltEvidence, policy: LoadPolicy): Finding | null
     rated.radialKn === null ? "the rated strength across the bolt" : null,
     rated.axialKn === null && pullsOut(loads) ? "the rated strength along the axis" : null,
   ].filter((words) => words !== null);
-  const noOnset = bendOnsetOf(e.bolt) === null;
-  if (missing.length === 0 && !noOnset) return null;
+  const onset = bendOnsetOf(e.bolt);
+  if (missing.length === 0 && onset !== null) return null;
 
-  const level =
-    worstLevel([missing.length > 0 ? "ask" : null, noOnset ? levelWithoutOnset(e) : null]) ?? "note";
-  const words = [...missing, ...(noOnset ? ["the load at which it begins to bend"] : [])];
-  const needed = neededOnsetInWords(e, loads, e.bolt.bendOnsetAxialKn ?? rated.axialKn).replace(
-    "a bolt with ",
-    "",
-  );
+  const unrated = missing.length > 0;
+  const level = worstLevel([unrated ? "ask" : null, onset === null ? levelWithoutOnset(e) : null]) ?? "note";
+  const words = onset === null ? [...missing, "the load at which it begins to bend"] : missing;
   return {
     code: "load.unknown",
     level,
-    title: missing.length > 0 ? "Strength not known" : "Bend onset not known",
-    text: `${sentence(list(words))} ${words.length > 1 ? "are" : "is"} not recorded, so the load could not be compared with it. A rating says nothing about bending.`,
+    title: unrated ? "Strength not known" : "Bend onset not known",
+    text: `Not on record: ${list(words)}. The load could not be compared with it; a rating says nothing about bending.`,
     clearsWhen: [
-      missing.length > 0 ? "a rating is recorded or EN 959 is claimed" : null,
-      noOnset ? `${needed}, tested or from the maker, is recorded` : null,
+      unrated ? "a rating is recorded or EN 959 is claimed" : null,
+      onset === null ? onsetToRecord(e, loads, rated) : null,
     ]
       .filter((part) => part !== null)
       .join(", and "),
@@ -49,12 +47,17 @@ export function loadUnknown(e: BoltEvidence, policy: LoadPolicy): Finding | null
       use: e.use,
       ratedRadialKn: rated.radialKn,
       ratedAxialKn: rated.axialKn,
-      onsetKn: null,
+      onsetKn: onset?.lowKn ?? null,
       peakKn: e.demand.peakKn,
     },
     assumed: loads.assumed,
     source: { mark: "common_practice", name: "What is not known is never a pass" },
   };
+}
+
+function onsetToRecord(e: BoltEvidence, loads: Loads, rated: Rated): string {
+  const bolt = neededOnsetInWords(e, loads, e.bolt.bendOnsetAxialKn ?? rated.axialKn);
+  return `the record shows ${bolt}, tested or from the maker`;
 }
 
 function pullsOut(loads: Loads): boolean {

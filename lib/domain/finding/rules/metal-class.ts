@@ -15,14 +15,14 @@ import {
 } from "@/lib/domain/finding/place";
 import { acrossUnknown, severity } from "@/lib/domain/finding/traits";
 import type { Finding } from "@/lib/domain/finding/types";
-import { list, sentence } from "@/lib/domain/finding/words";
+import { areRecorded, sentence } from "@/lib/domain/finding/words";
 
 /**
  * metal.class: every stainless part against the corrosion class the place asks for.
  *
- * The worst part speaks. A link is replaceable and rusts in plain sight, so a short class on a link limits and does not
- * stop. A distance or washing that is not known is tried at every plausible value: it is asked for only when
- * the answers differ. Titanium passes every class; plated parts are for `metal.plated`.
+ * The worst part speaks. A link is replaceable and rusts in plain sight, so a short class on a link limits
+ * and does not stop. A distance or washing that is not known is tried at every plausible value: it is asked
+ * for only when the answers differ. Titanium passes every class; plated parts are for `metal.plated`.
  */
 export function metalClass(e: BoltEvidence): Finding | null {
   const worst = metalParts(e.bolt)
@@ -48,10 +48,7 @@ export function metalClass(e: BoltEvidence): Finding | null {
       note: "Metal just meets the place",
     }[level],
     text: `${sentence(part.part)} of ${metalName(part.metal)}: resistance class ${has ?? "not known"}. The place asks for ${asks}: ${placeInWords(e.place)}.`,
-    clearsWhen:
-      level === "ask"
-        ? `${list(missing)} ${missing.length > 1 ? "are" : "is"} recorded`
-        : better(level, part, e),
+    clearsWhen: level === "ask" ? areRecorded(missing) : better(level, part, e),
     numbers: {
       part: part.part,
       metal: part.metal,
@@ -67,8 +64,12 @@ export function metalClass(e: BoltEvidence): Finding | null {
 }
 
 function levelOf({ part, metal }: MetalPart, e: BoltEvidence): Level | null {
-  const level = acrossUnknown(everyPlace(e.place).map((place) => judge(metal, place)));
-  return level === "stop" && part === "link" ? "limit" : level;
+  return acrossUnknown(
+    everyPlace(e.place).map((place) => {
+      const level = judge(metal, place);
+      return level === "stop" && part === "link" ? "limit" : level;
+    }),
+  );
 }
 
 function judge(metal: string, place: Place): Level | null {

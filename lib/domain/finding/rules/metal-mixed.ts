@@ -12,9 +12,9 @@ const SALT_M = 1_000;
 /**
  * metal.mixed: hanger and bolt of different metal families.
  *
- * Stainless with plated limits anywhere; any other pair limits within 1 km of the sea (a distance that is not known counts as
- * near) and is a note beyond. A link of another family is a note: it can be swapped. A hanger whose metal is not
- * on record is a note too; a bolt of unknown metal is for `metal.unknown`.
+ * Stainless with plated limits anywhere; any other pair limits within 1 km of the sea (a distance that is
+ * not known counts as near) and is a note beyond. A link of another family is a note: it can be swapped. A
+ * hanger whose metal is not on record is a note too; a bolt of unknown metal is for `metal.unknown`.
  */
 export function metalMixed(e: BoltEvidence): Finding | null {
   const bolt = familyOf(e.bolt.metal);

@@ -8,13 +8,14 @@ import { metalParts } from "@/lib/domain/finding/parts";
 import { placeInWords, placeMissing, placeOf } from "@/lib/domain/finding/place";
 import { severity } from "@/lib/domain/finding/traits";
 import type { Finding } from "@/lib/domain/finding/types";
-import { distance, list, sentence } from "@/lib/domain/finding/words";
+import { areRecorded, distance, sentence } from "@/lib/domain/finding/words";
 
 /**
  * metal.stress-corrosion: can chloride crack a part without warning?
  *
- * Separate from the corrosion class on purpose: a grade may meet the class and still crack. Links count in full: cracking
- * is not seen, so being replaceable does not help. One confirmed fracture stops that grade at the whole site.
+ * Separate from the corrosion class on purpose: a grade may meet the class and still crack. Links count in
+ * full: cracking is not seen, so being replaceable does not help. One confirmed fracture stops that grade
+ * at the whole site.
  */
 export function metalStressCorrosion(e: BoltEvidence): Finding | null {
   const worst = metalParts(e.bolt)
@@ -39,7 +40,7 @@ export function metalStressCorrosion(e: BoltEvidence): Finding | null {
     text: `${sentence(part.part)} of ${metalName(part.metal)}, ${placeInWords(e.place)}. ${reason}`,
     clearsWhen:
       level === "ask"
-        ? `${list(missing)} ${missing.length > 1 ? "are" : "is"} recorded`
+        ? areRecorded(missing)
         : level === "note"
           ? null
           : `the ${part.part} is of a metal that suits the place: ${metalsThatPass(e.place)}`,

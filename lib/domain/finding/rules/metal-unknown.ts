@@ -18,8 +18,8 @@ const RUSTY = 2;
 /**
  * metal.unknown: the metal of the bolt is not on record.
  *
- * Asks, unless magnet and look leave only metals that the other metal rules judge alike in this place; then it says what
- * they would say. A designation that is in no table counts as not known.
+ * Asks, unless magnet and look leave only metals that the other metal rules judge alike in this place; then
+ * it says what they would say. A designation that is in no table counts as not known.
  */
 export function metalUnknown(e: BoltEvidence): Finding | null {
   if (familyOf(e.bolt.metal) !== null) return null;

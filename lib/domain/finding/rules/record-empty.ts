@@ -1,7 +1,10 @@
 import type { AnchorQuestion } from "@/lib/domain/finding/evidence";
 import type { Finding } from "@/lib/domain/finding/types";
 
-/** record.missing for an anchor on which nothing is recorded at all: no bolt, and no tree, boulder or thread. */
+/**
+ * record.missing for an anchor on which nothing is recorded at all: no bolt, and no tree, boulder or
+ * thread.
+ */
 export function recordEmpty(e: AnchorQuestion): Finding | null {
   const natural = e.group.placements.some((placement) => placement.kind !== "bolt");
   if (e.bolts.length > 0 || natural) return null;

@@ -3,8 +3,8 @@ import type { BoltEvidence } from "@/lib/domain/finding/evidence";
 import type { Finding } from "@/lib/domain/finding/types";
 
 /**
- * record.glue-expired: the glue was past its date when it was used. The last day itself is in date. An install date
- * of limited precision counts at its latest day, the careful side, and that is said.
+ * record.glue-expired: the glue was past its date when it was used. The last day itself is in date. An
+ * install date of limited precision counts at its latest day, the careful side, and that is said.
  */
 export function recordGlueExpired(e: BoltEvidence): Finding | null {
   const { adhesiveExpiresOn, installedOn, installedOnPrecision } = e.bolt;

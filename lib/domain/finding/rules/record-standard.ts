@@ -5,8 +5,8 @@ import type { Finding } from "@/lib/domain/finding/types";
 import { exceeds, kn } from "@/lib/domain/finding/words";
 
 /**
- * record.standard: a rating below EN 959, or no standard claimed where people belay or hang. A rating that is not on record is
- * for `load.unknown`; a missing standard is not mentioned while a type is being chosen.
+ * record.standard: a rating below EN 959, or no standard claimed where people belay or hang. A rating that
+ * is not on record is for `load.unknown`; a missing standard is not mentioned while a type is being chosen.
  */
 export function recordStandard(e: BoltEvidence): Finding | null {
   const { ratedRadialKn: radial, ratedAxialKn: axial, standard } = e.bolt;

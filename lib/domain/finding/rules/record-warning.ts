@@ -3,7 +3,10 @@ import type { BoltEvidence, WarningFacts } from "@/lib/domain/finding/evidence";
 import { severity } from "@/lib/domain/finding/traits";
 import type { Finding } from "@/lib/domain/finding/types";
 
-/** record.warning: an open batch warning that matches the bolt. The worst one speaks; the others are counted. */
+/**
+ * record.warning: an open batch warning that matches the bolt. The worst one speaks; the others are
+ * counted.
+ */
 export function recordWarning(e: BoltEvidence): Finding | null {
   const found = (e.care?.warnings ?? [])
     .map((warning) => ({ warning, level: levelOf(warning) }))

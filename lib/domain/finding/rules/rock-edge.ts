@@ -14,8 +14,9 @@ const DEPTH_TAKEN_MM = 80;
 /**
  * rock.edge: a free edge near the bolt, on the side it is pulled to.
  *
- * A highline can pull to any side and wind turns it further: every edge counts. In the other uses the load hangs: an edge
- * above the bolt is not pulled to, any other is. A side that is not on record counts as pulled to.
+ * A highline can pull to any side and wind turns it further: every edge counts. In the other uses the load
+ * hangs: an edge above the bolt is not pulled to, any other is. A side that is not on record counts as
+ * pulled to.
  */
 export function rockEdge(e: BoltEvidence): Finding | null {
   if (e.placement === null || e.placement.edgeDistanceMm === null) return null;

@@ -21,10 +21,10 @@ const PLAUSIBLE_HOLES_MM = [8, 10, 12];
 /**
  * rock.embedment: is the bolt deep enough, by the standard's floor and by the rock it sits in?
  *
- * Depth means h_ef for studs, engaged thread for screws, straight rod for glued bolts. The mechanical floor wants the hole
- * diameter, or the shank's, which for these bolts is the same; without either the usual diameters are tried, and
- * when they disagree the diameter is missing as much as a depth would be. A bolt that is both expanded and
- * glued keeps the higher floor. At 50 MPa the rock counts as hard.
+ * Depth means h_ef for studs, engaged thread for screws, straight rod for glued bolts. The mechanical floor
+ * wants the hole diameter, or the shank's, which for these bolts is the same; without either the usual
+ * diameters are tried, and when they disagree the diameter is missing as much as a depth would be. A bolt
+ * that is both expanded and glued keeps the higher floor. At 50 MPa the rock counts as hard.
  */
 export function rockEmbedment(e: BoltEvidence): Finding | null {
   const { embedmentMm } = e.bolt;

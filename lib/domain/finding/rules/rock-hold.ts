@@ -22,8 +22,9 @@ interface Hold {
 /**
  * rock.hold: do glue and rock hold the pull along the axis, by estimate?
  *
- * Lowering only: it never clears anything, and says nothing where depth, hole or rock are not known (other rules ask for them).
- * The peak is taken with one bolt carrying all. The weaker of bond and cone decides each end of the range.
+ * Lowering only: it never clears anything, and says nothing where depth, hole or rock are not known (other
+ * rules ask for them). The peak is taken with one bolt carrying all. The weaker of bond and cone decides
+ * each end of the range.
  */
 export function rockHold(e: BoltEvidence, policy: LoadPolicy): Finding | null {
   const loads = loadsOf(e, policy);

@@ -11,8 +11,8 @@ const MECHANICAL_MPA = 40;
 /**
  * rock.method: does this way of holding suit the rock?
  *
- * Rock that is not graded asks in a serious use; elsewhere it leaves a note, so that it is never passed over in silence
- * and never turns a whole crag grey. 40 MPa itself still limits a mechanical bolt.
+ * Rock that is not graded asks in a serious use; elsewhere it leaves a note, so that it is never passed
+ * over in silence and never turns a whole crag grey. 40 MPa itself still limits a mechanical bolt.
  */
 export function rockMethod(e: BoltEvidence): Finding | null {
   const { ucsMpa } = e.rock;

@@ -6,9 +6,9 @@ import type { Finding } from "@/lib/domain/finding/types";
 /**
  * rock.one-body: main and backup, or everything there is, in one block that may come off whole.
  *
- * A body counts when it is recorded as detached or hollow, or when its attachment is recorded as not known. Rock for which no
- * body is recorded is the cliff itself. An anchor without a backup whose placements all sit in one such block is no
- * better than one whose backup does.
+ * A body counts when it is recorded as detached or hollow, or when its attachment is recorded as not known.
+ * Rock for which no body is recorded is the cliff itself. An anchor without a backup whose placements all
+ * sit in one such block is no better than one whose backup does.
  */
 export function rockOneBody(e: AnchorQuestion): Finding | null {
   const carrying = e.group.placements.filter((placement) => placement.role !== "edge");

@@ -14,9 +14,9 @@ const FULL_SPACING_DEPTHS = 3;
 /**
  * rock.spacing: how much of its rock cone is left to the bolt beside its neighbours.
  *
- * Cones resist a pull along the axis only, so a pull square across says nothing here. The share is the group's: where one bolt
- * carries all, its neighbours do not pull at the same rock. A dead hole counts like one more bolt of the
- * pair it forms with this one, since the direction to it is not in the evidence.
+ * Cones resist a pull along the axis only, so a pull square across says nothing here. The share is the
+ * group's: where one bolt carries all, its neighbours do not pull at the same rock. A dead hole counts like
+ * one more bolt of the pair it forms with this one, since the direction to it is not in the evidence.
  */
 export function rockSpacing(e: BoltEvidence, policy: LoadPolicy): Finding | null {
   const loads = loadsOf(e, policy);

@@ -63,7 +63,8 @@ describe("catalogueMatrix", () => {
 });
 
 describe("metals", () => {
-  // ASTM B348 tabulates ksi: grade 2 40/50, grade 5 120/130 (1 ksi = 6.894757 MPa, NIST SP 811); its MPa are rounded.
+  // ASTM B348 tabulates ksi: grade 2 40/50, grade 5 120/130 (1 ksi = 6.894757 MPa, NIST SP 811); its MPa
+  // are rounded.
   it.each([
     ["ti-2", 40, 50],
     ["ti-5", 120, 130],

@@ -15,8 +15,8 @@ const onset = (
 });
 const bend = (use: Use, bolt: Partial<BoltFacts>) => levelOf(choosing(use, { bolt }), "load.bend");
 
-// Bounds and demand: common practice, written down as this register's rules. Highline 6/12 kN, rope access 6/15,
-// protection 8/20 (peak: strength only), belay 6/12, lower-off 3/8, abseil 3/12.
+// Bounds and demand: common practice, written down as this register's rules. Highline 6/12 kN, rope access
+// 6/15, protection 8/20 (peak: strength only), belay 6/12, lower-off 3/8, abseil 3/12.
 describe("load.bend with a tested onset, one bolt carrying all", () => {
   it.each<[Use, number, string | null]>([
     ["highline", 11.9, "stop"],

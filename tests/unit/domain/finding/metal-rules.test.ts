@@ -122,8 +122,8 @@ describe("metal.plated", () => {
   });
 
   it("stops a tenth of the section by computation: M10 in C3 between 26 and 27 years", () => {
-    // Zinc 8 µm at 2.1 µm/yr linear 3.81 yr (ISO 9223 C3); steel 50 µm first year, ISO 9224: depth for a tenth of
-    // 10 mm is 256.6 µm = 239.6 + 6.27 (t − 20), t = 22.7 years; together 26.5 years (arithmetic).
+    // Zinc 8 µm at 2.1 µm/yr linear 3.81 yr (ISO 9223 C3); steel 50 µm first year, ISO 9224: depth for a
+    // tenth of 10 mm is 256.6 µm = 239.6 + 6.27 (t − 20), t = 22.7 years; together 26.5 years (arithmetic).
     expect(level(at(50_000, "rain"), { installedOn: "2000-06-01" })).toBe("limit");
     expect(level(at(50_000, "rain"), { installedOn: "1999-06-01" })).toBe("stop");
     const years = found(of("zinc-plated", at(50_000, "rain")), "metal.plated")?.numbers[
@@ -164,6 +164,7 @@ describe("metal.plated", () => {
 
   it("lets a plated link limit where a bolt would stop", () => {
     expect(levelOf(of("ti-2", at(100, "rain"), { linkMetal: "zinc-plated" }), "metal.plated")).toBe("limit");
+    expect(levelOf(of("ti-2", at(null, "rain"), { linkMetal: "zinc-plated" }), "metal.plated")).toBe("limit");
     expect(levelOf(of("ti-2", at(100, "rain"), { hangerMetal: "zinc-plated" }), "metal.plated")).toBe("stop");
   });
 });

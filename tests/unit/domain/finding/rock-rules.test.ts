@@ -9,7 +9,8 @@ describe("rock.embedment", () => {
     levelOf(inRock(use, { bolt, rock: { ucsMpa } }), "rock.embedment");
   const glued = (embedmentMm: number | null): Partial<BoltFacts> => ({ ...BENT_ROD, embedmentMm });
 
-  // EN 959:2018, 4.2.6: glued length at least 70 mm, mechanical at least 5 hole diameters. Stop under 70 % of it: common practice.
+  // EN 959:2018, 4.2.6: glued length at least 70 mm, mechanical at least 5 hole diameters. Stop under 70 %
+  // of it: common practice.
   it.each([
     [48.9, "stop"],
     [49, "limit"],
@@ -267,11 +268,11 @@ describe("eye.radius", () => {
     expect(level("belay", { ...BENT_ROD, rodDiameterMm })).toBeNull();
   });
 
-  it("reads an edge radius as half a thickness, and notes an eye of which neither is known", () => {
+  it("reads an edge radius as half a thickness, and takes an eye of which neither is known for a thin one", () => {
     const eye = { ...BENT_ROD, form: "glued_eye", rodDiameterMm: null } as const;
     expect(level("highline", { ...eye, eyeRadiusMm: 4.9 })).toBe("limit");
     expect(level("highline", { ...eye, eyeRadiusMm: 6 })).toBeNull();
-    expect(level("highline", { ...eye, eyeRadiusMm: null })).toBe("note");
+    expect(level("highline", { ...eye, eyeRadiusMm: null })).toBe("limit");
   });
 });
 

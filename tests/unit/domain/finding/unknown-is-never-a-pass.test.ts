@@ -96,7 +96,7 @@ describe.each(FACTS)("forgetting $fact", ({ fact, forget, named }) => {
       }),
       { numRuns: 400 },
     );
-  });
+  }, 30_000);
 
   it("never makes a serious use better than it was", () => {
     fc.assert(
@@ -109,5 +109,5 @@ describe.each(FACTS)("forgetting $fact", ({ fact, forget, named }) => {
       }),
       { numRuns: 400 },
     );
-  });
+  }, 30_000);
 });
