@@ -38,7 +38,7 @@ export function ErrorSummary({
             ) : (
               <a
                 href={`#${problem.path}`}
-                className="touch inline-flex items-center underline underline-offset-2"
+                className="inline-flex touch items-center underline underline-offset-2"
                 onClick={focusField}
               >
                 {problem.message}

@@ -51,6 +51,9 @@ const RULES: [string, string[], number][] = [
   ["surface", ["stop"], 7],
   // shapes that carry meaning, lines of fields, the focus ring
   ...TONES.map((tone): [string, string[], number] => [`${tone}-fill`, [...GROUNDS, `${tone}-ground`], 3]),
+  // marks and their words on the map
+  ...TONES.map((tone): [string, string[], number] => [`${tone}-fill`, ["map-sea", "map-land"], 3]),
+  ["text", ["map-sea", "map-land"], 7],
   ["line-strong", ["surface", "raised", "ground"], 3],
   ["frame", GROUNDS, 3],
   ["focus", [...GROUNDS, ...TINTS], 3],
