@@ -48,7 +48,8 @@ export function problemResponse(error: AppError, status = STATUS[error.code]): R
 
 /** A refusal that has no error code of its own: malformed JSON, a missing precondition, the wrong media type. */
 export function plainProblem(status: number, title: string, detail: string): Response {
-  return new Response(JSON.stringify({ type: "about:blank", title, status, code: "invalid_input", detail }), {
+  const code = status >= 500 ? "unavailable" : "invalid_input";
+  return new Response(JSON.stringify({ type: "about:blank", title, status, code, detail }), {
     status,
     headers: { "content-type": "application/problem+json", "cache-control": "no-store" },
   });

@@ -47,14 +47,40 @@ export async function readJson(request: Request): Promise<unknown> {
       "Send JSON with content-type application/json.",
     );
   }
-  if (Number(request.headers.get("content-length") ?? 0) > MAX_JSON_BYTES) throw tooLarge();
-  const text = await request.text();
-  if (Buffer.byteLength(text) > MAX_JSON_BYTES) throw tooLarge();
+  const bytes = await readAtMost(request, MAX_JSON_BYTES, "The body is larger than 1 MB.");
+  const text = new TextDecoder().decode(bytes);
   try {
     return JSON.parse(text);
   } catch {
     throw new MalformedRequest(400, "Malformed JSON", "The body is not valid JSON.");
   }
+}
+
+/** A form with one file in it. @throws MalformedRequest 400 or 415; AppError `too_large` beyond `maxBytes`. */
+export async function readUpload(
+  request: Request,
+  maxBytes: number,
+): Promise<{ fields: Record<string, string>; file: Uint8Array | null }> {
+  const type = request.headers.get("content-type") ?? "";
+  if (!type.startsWith("multipart/form-data")) {
+    throw new MalformedRequest(415, "Unsupported media type", "Send multipart/form-data with a file.");
+  }
+  // Room for the form around the file.
+  const bytes = await readAtMost(
+    request,
+    maxBytes + 100_000,
+    "The photo is larger than 20 MB. Send a smaller one.",
+  );
+  const form = await new Response(bytes, { headers: { "content-type": type } }).formData().catch(() => {
+    throw new MalformedRequest(400, "Malformed form", "The body is not a valid form.");
+  });
+  const fields: Record<string, string> = {};
+  let file: Uint8Array | null = null;
+  for (const [name, value] of form) {
+    if (typeof value === "string") fields[name] = value;
+    else if (name === "file") file = new Uint8Array(await value.arrayBuffer());
+  }
+  return { fields, file };
 }
 
 /** The version the sender last saw. @throws MalformedRequest 428 without `If-Match`. */
@@ -76,6 +102,30 @@ export function versionTag(version: number): string {
   return `"${version}"`;
 }
 
-function tooLarge(): AppError {
-  return new AppError("too_large", "The body is larger than 1 MB.");
+/** Reads a body and stops as soon as it is too large, whatever its length header says. */
+async function readAtMost(
+  request: Request,
+  maxBytes: number,
+  refusal: string,
+): Promise<Uint8Array<ArrayBuffer>> {
+  const tooLarge = () => new AppError("too_large", refusal);
+  if (Number(request.headers.get("content-length") ?? 0) > maxBytes) throw tooLarge();
+  const reader = request.body?.getReader();
+  const chunks: Uint8Array[] = [];
+  let length = 0;
+  for (let next = await reader?.read(); next && !next.done; next = await reader?.read()) {
+    length += next.value.byteLength;
+    if (length > maxBytes) {
+      await reader?.cancel();
+      throw tooLarge();
+    }
+    chunks.push(next.value);
+  }
+  const bytes = new Uint8Array(length);
+  let at = 0;
+  for (const chunk of chunks) {
+    bytes.set(chunk, at);
+    at += chunk.byteLength;
+  }
+  return bytes;
 }

@@ -22,8 +22,8 @@ export interface RouteInput<P, Q, B> {
   params: P;
   query: Q;
   body: B;
-  /** The version in `If-Match`; null when the call does not want one. */
-  version: number | null;
+  /** The version in `If-Match`; 0 when the call does not want one, which no record has. */
+  version: number;
   request: Request;
 }
 
@@ -76,7 +76,7 @@ export function route<
         spec.query ?? nothing,
         Object.fromEntries(new URL(request.url).searchParams),
       );
-      const version = spec.wantsVersion ? versionWanted(request) : null;
+      const version = spec.wantsVersion ? versionWanted(request) : 0;
       const body = parseOrRefuse(spec.body ?? nothing, spec.body ? await readJson(request) : {});
       // The schemas above give exactly these types; the fallback `nothing` gives the generic's default.
       const answer = await handle({

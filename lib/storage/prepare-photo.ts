@@ -2,10 +2,9 @@ import "server-only";
 import { createHash, randomBytes } from "node:crypto";
 import { fileTypeFromBuffer } from "file-type";
 import sharp from "sharp";
+import { MAX_PHOTO_BYTES } from "@/lib/domain/report/photo-limits";
 import { AppError } from "@/lib/shared/errors";
 
-/** Largest file taken, bytes. */
-export const MAX_PHOTO_BYTES = 20 * 1024 * 1024;
 /** Largest picture taken, pixels: a small file can unfold into a huge picture. */
 const MAX_PIXELS = 50_000_000;
 const LARGE_PX = 2048;

@@ -78,6 +78,24 @@ export const writePaths: Paths = {
       mediaType: "multipart/form-data",
     }),
   },
+  "/bolts/{id}/photos": {
+    post: write({
+      summary: "Add a photo to a bolt",
+      body: photoUpload,
+      answer: stored,
+      params: idParam,
+      mediaType: "multipart/form-data",
+    }),
+  },
+  "/rebolt-jobs/{id}/photos": {
+    post: write({
+      summary: "Add a photo of the finished work to a rebolt job",
+      body: photoUpload,
+      answer: stored,
+      params: idParam,
+      mediaType: "multipart/form-data",
+    }),
+  },
   "/rebolt-jobs": {
     post: write({ summary: "Open a rebolt entry", body: openReboltJobInput, answer: stored }),
   },
