@@ -52,7 +52,7 @@ export function bendUse(
  * The least radial bend onset at which nothing would be said, kN; null when no radial onset helps, because
  * the pull along the axis alone is too much.
  */
-export function neededOnsetKn(e: BoltEvidence, loads: Loads, axialOnsetKn: number | null): number | null {
+function neededOnsetKn(e: BoltEvidence, loads: Loads, axialOnsetKn: number | null): number | null {
   let needed = isSerious(e.use) ? 0 : LEAST_ONSET_KN;
   for (const { load, factor } of bendNeeds(e, loads)) {
     const { axialKn, radialKn } = onBolt(load, 1);

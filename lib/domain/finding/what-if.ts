@@ -46,8 +46,8 @@ export function whatIf(input: WhatIfInput, policy: LoadPolicy): WhatIfAnswer {
   };
 }
 
-/** The evidence behind a what-if, for callers who want more than the answer. */
-export function evidenceOf(input: WhatIfInput, policy: LoadPolicy): BoltEvidence {
+/** The evidence behind a what-if. */
+function evidenceOf(input: WhatIfInput, policy: LoadPolicy): BoltEvidence {
   const { place } = input;
   return {
     context: "choosing",
