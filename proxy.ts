@@ -37,7 +37,7 @@ export function proxy(request: NextRequest): NextResponse {
 export const config = {
   matcher: [
     {
-      source: "/((?!api/|_next/static|_next/image|tiles/|fonts/|favicon|icon|maplibre).*)",
+      source: "/((?!api/|_next/static|_next/image|tiles/|fonts/|vendor/|favicon|icon).*)",
       missing: [{ type: "header", key: "next-router-prefetch" }],
     },
   ],
