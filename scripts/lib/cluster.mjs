@@ -94,7 +94,13 @@ function initialise(cluster) {
   try {
     const auth = ["--auth=scram-sha-256", "--username=postgres", `--pwfile=${passwordFile}`];
     const sync = cluster.throwAway ? ["--no-sync"] : [];
-    asServer(cluster, "initdb", [`--pgdata=${cluster.data}`, "--encoding=UTF8", "--locale=C.UTF-8", ...auth, ...sync]);
+    asServer(cluster, "initdb", [
+      `--pgdata=${cluster.data}`,
+      "--encoding=UTF8",
+      "--locale=C.UTF-8",
+      ...auth,
+      ...sync,
+    ]);
   } finally {
     rmSync(passwordFile, { force: true });
   }

@@ -24,10 +24,18 @@ export function succeeds(command, args, options = {}) {
   return spawnSync(command, args, { stdio: "ignore", ...options }).status === 0;
 }
 
+/** Commands of `show` that have not ended. */
+const running = new Set();
+
+/** Passes a signal on to every command of `show` that still runs. */
+export const stopRunning = (signal) => running.forEach((child) => child.kill(signal));
+
 /** Runs a command with its output on the screen. Resolves to the exit code; never rejects. */
 export function show(command, args, options = {}) {
   return new Promise((resolve) => {
     const child = spawn(command, args, { stdio: "inherit", ...options });
+    running.add(child);
+    child.once("close", () => running.delete(child));
     child.once("error", (error) => {
       console.error(`${command} could not be run: ${error.message}`);
       resolve(1);
