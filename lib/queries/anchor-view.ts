@@ -2,6 +2,7 @@ import "server-only";
 import type { AnchorListRow } from "@/db/repositories/anchor-list";
 import type { ClosureRow } from "@/db/repositories/area-read";
 import type { BoltRow, FindingRow, ReportRow } from "@/db/repositories/anchor-read";
+import { reasonNumbers } from "@/lib/domain/finding/reason-numbers";
 import { audience, isMember } from "@/lib/policy/audience";
 import type { Actor } from "@/lib/shared/actor";
 import { summaryWithoutPlace } from "@/lib/queries/redact";
@@ -106,8 +107,13 @@ export function boltViewOf({ bolt, type, adhesiveName, evaluation, tests }: Bolt
 }
 
 export function findingsView(rows: readonly FindingRow[]): SheetFinding[] {
-  return rows.map((row, index) => ({
-    number: index + 1,
+  const findings = rows.map((row) => ({
+    ...row,
+    source: { mark: row.sourceMark, name: row.sourceName },
+  }));
+  const numbers = reasonNumbers(findings);
+  return findings.map((row, index) => ({
+    number: numbers[index] ?? index + 1,
     code: row.code,
     level: row.level,
     title: row.title,
@@ -115,7 +121,7 @@ export function findingsView(rows: readonly FindingRow[]): SheetFinding[] {
     clearsWhen: row.clearsWhen,
     numbers: row.numbers,
     assumed: row.assumed,
-    source: { mark: row.sourceMark, name: row.sourceName },
+    source: row.source,
     boltId: row.boltId,
     fittingId: row.fittingId,
     placementNumber: row.placementNumber,

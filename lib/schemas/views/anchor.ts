@@ -93,7 +93,7 @@ export const placementView = z
 export type PlacementView = z.infer<typeof placementView>;
 
 export const sheetFindingView = findingView.extend({
-  /** Key in the drawing, 1 upward, worst first. */
+  /** Key in the drawing, 1 upward, worst first; shared by findings that say the same of several bolts. */
   number: z.number(),
   boltId: words,
   fittingId: words,
