@@ -115,3 +115,16 @@ export function formatList(words: readonly string[], last = "and"): string {
 export function formatCount(count: number, one: string, many = `${one}s`): string {
   return `${formatNumber(count, { digits: 0 })} ${count === 1 ? one : many}`;
 }
+
+/** `[1, 2, 3, 5]` → `1–3, 5`; two in a row stay apart. Whole numbers, in any order. */
+export function formatRuns(numbers: readonly number[]): string {
+  const runs: [number, number][] = [];
+  for (const number of [...new Set(numbers)].toSorted((a, b) => a - b)) {
+    const run = runs.at(-1);
+    if (run && run[1] === number - 1) run[1] = number;
+    else runs.push([number, number]);
+  }
+  return runs
+    .map(([from, to]) => (from === to ? `${from}` : to === from + 1 ? `${from}, ${to}` : `${from}–${to}`))
+    .join(", ");
+}

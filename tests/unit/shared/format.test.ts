@@ -9,6 +9,7 @@ import {
   formatNumber,
   formatPastDate,
   formatQuantity,
+  formatRuns,
 } from "@/lib/shared/format";
 
 /** U+202F narrow no-break space, U+2212 minus: as the International System of Units asks a unit to be set apart. */
@@ -86,4 +87,13 @@ it("lists and counts read as sentences", () => {
   expect(formatList(["1"])).toBe("1");
   expect(formatList([])).toBe("");
   expect([formatCount(1, "bolt"), formatCount(3, "bolt")]).toEqual(["1 bolt", "3 bolts"]);
+});
+
+describe("numbers of holes", () => {
+  it("are joined to runs of three and more", () => {
+    expect(formatRuns([3, 1, 2, 5])).toBe("1–3, 5");
+    expect(formatRuns([1, 2])).toBe("1, 2");
+    expect(formatRuns([4, 4])).toBe("4");
+    expect(formatRuns([])).toBe("");
+  });
 });
