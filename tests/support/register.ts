@@ -215,6 +215,7 @@ async function addAnchorReadyToReturn(
   const anchor = await addAnchor(db, { siteId, typeId, count: 2 });
   const about = { areaId, siteId, anchorId: anchor.id };
   await addReport(db, { ...about, kind: "deformation", tookOutOfUse: true, state: "handled" });
+  await db.transaction((tx) => evaluateAnchors(tx, [anchor.id], { now: NOON }));
   for (const [index, boltId] of anchor.boltIds.entries()) {
     const reportId = await addReport(db, {
       ...about,
