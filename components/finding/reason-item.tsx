@@ -4,6 +4,7 @@ import { Badge, type Tone } from "@/components/ui/badge";
 import { LEVEL_LABELS, SOURCE_MARK_LABELS } from "@/lib/domain/labels";
 import type { Finding } from "@/lib/domain/finding/types";
 import type { Level } from "@/lib/domain/vocabulary";
+import { readableText } from "@/lib/shared/readable-text";
 
 const TONES: Readonly<Record<Level, Tone>> = { stop: "stop", ask: "info", limit: "warn", note: "plain" };
 
@@ -32,15 +33,17 @@ export function ReasonItem({ number, reason, subject, children }: ReasonItemProp
           <span className="type-code text-sm text-muted">{reason.code}</span>
           {subject ? <span className="type-label text-muted">{subject}</span> : null}
         </div>
-        <p className="max-w-prose">{reason.text}</p>
+        {reason.text ? <p className="max-w-prose">{readableText(reason.text)}</p> : null}
         {children}
         <dl className="grid max-w-prose gap-1 text-sm">
-          {reason.assumed.length > 0 ? <Line name="Assumed">{reason.assumed.join(", ")}.</Line> : null}
+          {reason.assumed.length > 0 ? (
+            <Line name="Assumed">{readableText(reason.assumed.join("; "))}.</Line>
+          ) : null}
           <Line name="Rule">
             {reason.source.name}{" "}
             <span className="text-muted">({SOURCE_MARK_LABELS[reason.source.mark]})</span>
           </Line>
-          {reason.clearsWhen ? <Line name="Clears when">{reason.clearsWhen}</Line> : null}
+          {reason.clearsWhen ? <Line name="Clears when">{readableText(reason.clearsWhen)}</Line> : null}
         </dl>
       </div>
     </li>

@@ -22,6 +22,8 @@ export async function getBolt(actor: Actor, id: string): Promise<BoltDetail> {
           code: sheet.code,
           label: sheet.label,
           siteName: sheet.site.name,
+          siteSlug: sheet.site.slug,
+          timeZone: sheet.area.timeZone,
           uses: sheet.uses,
         },
         placementNumber: placement.number,

@@ -44,6 +44,7 @@ function reportOf(context: ReportContext, actor: Actor): ReportView {
     version: report.version,
     areaId: report.areaId,
     areaSlug: area?.slug ?? null,
+    timeZone: area?.timeZone ?? null,
     siteName: site?.name ?? null,
     siteSlug: site?.slug ?? null,
     anchorCode: anchor?.code ?? null,

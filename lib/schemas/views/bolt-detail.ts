@@ -12,6 +12,8 @@ export const boltDetailView = z
       code: z.string(),
       label: z.string(),
       siteName: z.string(),
+      siteSlug: z.string(),
+      timeZone: z.string(),
       uses: z.array(useView),
     }),
     placementNumber: z.number(),

@@ -178,6 +178,8 @@ export const reportView = sheetReportView
     version: z.number(),
     areaId: words,
     areaSlug: words,
+    /** Of the area; null: a report of a spot in no area. */
+    timeZone: words,
     siteName: words,
     siteSlug: words,
     anchorCode: words,
