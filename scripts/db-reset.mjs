@@ -1,16 +1,19 @@
-// npm run db:reset: empties the database of the demo (or of DATABASE_URL with --yes), migrates and fills it again.
+// npm run db:reset: empties the database of the demo, migrates and fills it again. A database that may hold
+// real records (DATABASE_URL, BYSSUS_DEMO=0) only with -- --yes.
+import { rmSync } from "node:fs";
 import { databaseScript } from "./lib/database-scripts.mjs";
-import { closeCluster } from "./lib/cluster.mjs";
-import { release } from "./lib/holders.mjs";
 import { checkNode, ensurePackages } from "./lib/packages.mjs";
-import { clusterHome, fillDatabase, openDatabase } from "./lib/prepare.mjs";
+import { fillDatabase, leaveDatabase, openDatabase } from "./lib/prepare.mjs";
 import { fail, heading, say } from "./lib/say.mjs";
-import { applicationEnv, readSettings } from "./lib/settings.mjs";
+import { applicationEnv, ownPhotos, readSettings } from "./lib/settings.mjs";
 
-try {
+async function main() {
   const { mode, givenUrl } = readSettings();
-  if ((givenUrl || mode !== "demo") && !process.argv.includes("--yes")) {
-    throw new Error("this database may hold real records. Add -- --yes if all of it may go.");
+  const mayHoldRecords = givenUrl !== null || mode !== "demo";
+  if (mayHoldRecords && !process.argv.includes("--yes")) {
+    throw new Error(
+      "this database may hold real records. Say npm run db:reset -- --yes if all of it may go.",
+    );
   }
   heading("Emptying the database");
   checkNode();
@@ -18,10 +21,15 @@ try {
   const databaseUrl = await openDatabase({ mode, givenUrl });
   const env = applicationEnv({ mode, databaseUrl, address: "http://127.0.0.1:3000", sinkPort: 2525 });
   await databaseScript("drop-all", env);
+  if (!mayHoldRecords) rmSync(ownPhotos(mode), { recursive: true, force: true });
   await fillDatabase({ mode, env });
   say("Done.");
+}
+
+try {
+  await main();
 } catch (error) {
   fail(error);
 } finally {
-  if (release(clusterHome)) closeCluster(clusterHome);
+  leaveDatabase();
 }

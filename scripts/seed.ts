@@ -1,21 +1,21 @@
-// Fills an empty database with the Isle of Tarrow and judges every anchor. Prints "seeded" or "not empty".
-// Run: node --conditions=react-server --import tsx scripts/seed.ts
+// Prints what the database is: "empty", "demo" or "real". With --fill-empty an empty one is filled with the
+// Isle of Tarrow and every anchor judged.
+// Run: node --conditions=react-server --import tsx scripts/seed.ts --fill-empty
 import { connect } from "@/db/client";
-import { isEmptyRegister } from "@/db/repositories/health-read";
+import { installationKind } from "@/db/repositories/installation";
 import { seedTarrow } from "@/db/seed";
-import { reevaluateAll } from "@/lib/commands/evaluation/reevaluate-all";
+import { reevaluateOutdated } from "@/lib/commands/evaluation/reevaluate-outdated";
 import { now } from "@/lib/config/clock";
 import { env } from "@/lib/config/env";
 
 const { db, close } = connect(env().DATABASE_URL, 4);
 try {
-  if (await isEmptyRegister(db)) {
+  const kind = await installationKind(db);
+  process.stdout.write(`${kind}\n`);
+  if (kind === "empty" && process.argv.includes("--fill-empty")) {
     const at = now();
     await seedTarrow(db, at);
-    await reevaluateAll(db, { now: at });
-    process.stdout.write("seeded\n");
-  } else {
-    process.stdout.write("not empty\n");
+    await reevaluateOutdated(db, at);
   }
 } finally {
   await close();

@@ -1,12 +1,11 @@
 // npm start and npm run dev: from a fresh checkout to a running application, explaining itself on the way.
-import { ensureBuild, copyMapWorker } from "./lib/build.mjs";
-import { closeCluster } from "./lib/cluster.mjs";
+import { copyMapWorker, ensureBuild } from "./lib/build.mjs";
 import { databaseScript } from "./lib/database-scripts.mjs";
-import { release } from "./lib/holders.mjs";
 import { checkNode, ensurePackages } from "./lib/packages.mjs";
 import { freePort } from "./lib/ports.mjs";
-import { clusterHome, fillDatabase, openDatabase } from "./lib/prepare.mjs";
+import { fillDatabase, leaveDatabase, openDatabase } from "./lib/prepare.mjs";
 import { stopRunning } from "./lib/run.mjs";
+import { clearLeftover, forget, remember } from "./lib/running.mjs";
 import { fail, heading, say, since } from "./lib/say.mjs";
 import { startServer, untilAnswering } from "./lib/server.mjs";
 import { applicationEnv, readSettings } from "./lib/settings.mjs";
@@ -23,17 +22,25 @@ async function main() {
   checkNode();
   await ensurePackages();
   const databaseUrl = await openDatabase({ mode, givenUrl });
+  clearLeftover();
   const port = await freePort(settings.port);
   if (port !== settings.port) say(`Port ${settings.port} is taken by another program; using ${port}.`);
-  const address = `http://${host}:${port}`;
+  const address = `http://${host === "0.0.0.0" ? "127.0.0.1" : host}:${port}`;
   const sinkPort = await freePort(2525);
-  const nodeEnv = dev ? "development" : "production";
-  const env = applicationEnv({ mode, databaseUrl, address, sinkPort, nodeEnv });
+  const env = applicationEnv({
+    mode,
+    databaseUrl,
+    address,
+    sinkPort,
+    nodeEnv: dev ? "development" : "production",
+  });
   await fillDatabase({ mode, env });
   if (dev) copyMapWorker();
   else await ensureBuild(env);
   if (stopping) return;
+  say("Starting the application.");
   server = startServer({ dev, host, port, env });
+  remember({ server: server.pid, address });
   await untilAnswering(server, `${address}/api/health`);
   await tell({ address, mode, env });
   await server.exited;
@@ -53,31 +60,32 @@ async function tell({ address, mode, env }) {
   say("Ctrl-C stops what was started here and loses nothing.");
 }
 
-async function stop(signal) {
-  if (stopping) return;
-  stopping = true;
-  stopRunning(signal);
+/** Ends everything that was started here. It may be called again while it works. */
+async function cleanUp() {
   await server?.stop();
-  leave();
-  process.exit(signal === "SIGINT" ? 130 : 143);
+  forget();
+  leaveDatabase();
 }
 
-/** The last one to leave stops the cluster. */
-function leave() {
-  try {
-    if (release(clusterHome)) closeCluster(clusterHome);
-  } catch (error) {
-    fail(error);
-  }
+for (const [signal, code] of [
+  ["SIGINT", 130],
+  ["SIGTERM", 143],
+  ["SIGHUP", 129],
+]) {
+  process.on(signal, () => {
+    if (stopping) return;
+    stopping = true;
+    say("Stopping.");
+    stopRunning("SIGTERM");
+    cleanUp()
+      .catch(fail)
+      .finally(() => process.exit(code));
+  });
 }
 
-process.on("SIGINT", () => void stop("SIGINT"));
-process.on("SIGTERM", () => void stop("SIGTERM"));
 try {
   await main();
 } catch (error) {
   if (!stopping) fail(error);
-} finally {
-  await server?.stop();
-  if (!stopping) leave();
 }
+if (!stopping) await cleanUp().catch(fail);

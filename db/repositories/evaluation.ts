@@ -1,5 +1,5 @@
 import "server-only";
-import { asc, eq, inArray, notInArray, and, sql } from "drizzle-orm";
+import { and, asc, eq, gt, inArray, notInArray, sql } from "drizzle-orm";
 import type { Handle, Tx } from "@/db/client";
 import { anchorEval, anchors, boltEval, bolts, findings } from "@/db/schema";
 
@@ -93,6 +93,29 @@ export async function setAnchorCondition(tx: Tx, id: string, change: ConditionCh
 
 export async function setBoltCondition(tx: Tx, id: string, change: ConditionChange): Promise<void> {
   await tx.update(bolts).set(change).where(eq(bolts.id, id));
+}
+
+/** The next anchors, by id after `after`, without a verdict or with one by another version of the rules. */
+export async function listAnchorsOfOtherEngine(
+  db: Handle,
+  engineVersion: string,
+  after: string | null,
+  limit: number,
+): Promise<string[]> {
+  const rows = await db
+    .select({ id: anchors.id })
+    .from(anchors)
+    .leftJoin(anchorEval, eq(anchorEval.anchorId, anchors.id))
+    .where(
+      and(
+        sql`${anchors.struckAt} is null`,
+        after === null ? undefined : gt(anchors.id, after),
+        sql`${anchorEval.engineVersion} is distinct from ${engineVersion}`,
+      ),
+    )
+    .orderBy(anchors.id)
+    .limit(limit);
+  return rows.map((row) => row.id);
 }
 
 /** Anchors whose answer may have changed by time alone: not evaluated since that instant, oldest first. */

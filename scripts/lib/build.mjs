@@ -9,7 +9,8 @@ import { say } from "./say.mjs";
 export const nextProgram = path.join(root, "node_modules", "next", "dist", "bin", "next");
 
 const folders = ["app", "components", "db", "lib", "public"];
-const stampFile = path.join(root, ".next", "byssus-sources");
+const output = path.join(root, process.env.BYSSUS_DIST_DIR ?? ".next");
+const stampFile = path.join(output, "byssus-sources");
 
 /** The map's worker is loaded by address, so it has to be a public file. */
 export function copyMapWorker() {

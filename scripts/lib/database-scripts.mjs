@@ -2,6 +2,7 @@
 import path from "node:path";
 import { spawn } from "node:child_process";
 import { root } from "./paths.mjs";
+import { track } from "./run.mjs";
 
 /**
  * Runs `scripts/<name>.ts` with the application's environment and resolves to the lines it printed.
@@ -9,11 +10,9 @@ import { root } from "./paths.mjs";
  */
 export function databaseScript(name, env, args = []) {
   const file = path.join(root, "scripts", `${name}.ts`);
-  const child = spawn(process.execPath, ["--conditions=react-server", "--import", "tsx", file, ...args], {
-    cwd: root,
-    env,
-    stdio: ["ignore", "pipe", "inherit"],
-  });
+  const node = ["--conditions=react-server", "--import", "tsx"];
+  const options = { cwd: root, env, stdio: ["ignore", "pipe", "inherit"] };
+  const child = track(spawn(process.execPath, [...node, file, ...args], options));
   return new Promise((resolve, reject) => {
     let output = "";
     child.stdout.setEncoding("utf8").on("data", (chunk) => (output += chunk));

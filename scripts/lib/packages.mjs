@@ -17,7 +17,7 @@ export async function ensurePackages() {
   const difference = firstDifference();
   if (difference === null) return;
   say(`${difference} Running npm ci; this takes a minute or two.`);
-  await showOrThrow("npm", ["ci", "--no-audit", "--no-fund"], { cwd: root });
+  await showOrThrow("npm", ["ci", "--include=dev", "--no-audit", "--no-fund"], { cwd: root });
 }
 
 /** What npm left in node_modules is described in a lock file of its own; null when it fits ours. */

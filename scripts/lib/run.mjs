@@ -24,18 +24,23 @@ export function succeeds(command, args, options = {}) {
   return spawnSync(command, args, { stdio: "ignore", ...options }).status === 0;
 }
 
-/** Commands of `show` that have not ended. */
+/** Commands that have not ended. */
 const running = new Set();
 
-/** Passes a signal on to every command of `show` that still runs. */
+/** Has `stopRunning` pass signals on to this child while it runs. @returns the child. */
+export function track(child) {
+  running.add(child);
+  child.once("close", () => running.delete(child));
+  return child;
+}
+
+/** Passes a signal on to every tracked command that still runs. */
 export const stopRunning = (signal) => running.forEach((child) => child.kill(signal));
 
 /** Runs a command with its output on the screen. Resolves to the exit code; never rejects. */
 export function show(command, args, options = {}) {
   return new Promise((resolve) => {
-    const child = spawn(command, args, { stdio: "inherit", ...options });
-    running.add(child);
-    child.once("close", () => running.delete(child));
+    const child = track(spawn(command, args, { stdio: "inherit", ...options }));
     child.once("error", (error) => {
       console.error(`${command} could not be run: ${error.message}`);
       resolve(1);
