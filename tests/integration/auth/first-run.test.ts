@@ -1,9 +1,11 @@
+import { v7 } from "uuid";
 import { describe, expect, it } from "vitest";
-import { findUserByEmail } from "@/db/repositories/people";
+import { findUserByEmail, insertOneTimeToken } from "@/db/repositories/people";
 import { issueFirstRunLink } from "@/lib/auth/first-run";
+import { hashSecret } from "@/lib/auth/secrets";
 import { makeFirstAdministrator } from "@/lib/commands/account/make-first-administrator";
 import { accountDatabase } from "@/tests/support/account-database";
-import { contextOf, later, NOON } from "@/tests/support/people";
+import { addPerson, contextOf, later, NOON } from "@/tests/support/people";
 
 const db = accountDatabase("auth_first_run");
 
@@ -49,5 +51,20 @@ describe("the first administrator", () => {
     ];
     expect(made.filter((user) => user?.isAdmin)).toHaveLength(1);
     expect(await issueFirstRunLink(db(), later(4))).toBeNull();
+  });
+
+  it("is not made by a link that is still live when there is an administrator by another way", async () => {
+    await addPerson(db(), { isAdmin: true });
+    const secret = "f".repeat(43);
+    await insertOneTimeToken(db(), {
+      id: v7(),
+      purpose: "first_run",
+      tokenHash: hashSecret(secret),
+      expiresAt: later(60),
+    });
+    await expect(
+      makeFirstAdministrator(contextOf(db()), input(secret, "f@people.example")),
+    ).rejects.toMatchObject({ code: "not_found" });
+    expect(await findUserByEmail(db(), "f@people.example")).toBeNull();
   });
 });

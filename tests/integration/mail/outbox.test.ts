@@ -38,6 +38,12 @@ async function states() {
   return rows.map(({ state, attempts }) => ({ state, attempts }));
 }
 
+function signal() {
+  let give = () => {};
+  const given = new Promise<void>((resolve) => (give = resolve));
+  return { given, give };
+}
+
 describe("mail in the outbox", () => {
   it("is there exactly when the change that causes it is", async () => {
     await expect(
@@ -83,6 +89,28 @@ describe("mail in the outbox", () => {
     expect(Math.min(one.sent, two.sent)).toBeGreaterThan(0);
     expect(new Set(sent).size).toBe(12);
     expect(sent).toHaveLength(12);
+  });
+
+  it("is passed over while another drain is busy with it", async () => {
+    await queue(mail({ toEmail: "slow@people.example" }), mail({ toEmail: "quick@people.example" }));
+    const begun = signal();
+    const released = signal();
+    const sent: string[] = [];
+    const one = drainOutbox(
+      db(),
+      async ({ toEmail }) => {
+        begun.give();
+        await released.given;
+        sent.push(toEmail);
+      },
+      atNoon,
+    );
+    await begun.given;
+    const other = await drainOutbox(db(), async ({ toEmail }) => void sent.push(toEmail), atNoon);
+    expect(other).toEqual({ sent: 1, failed: 0 });
+    expect(sent).toEqual(["quick@people.example"]);
+    released.give();
+    expect(await one).toEqual({ sent: 1, failed: 0 });
   });
 
   it("with the same cause and person is queued once", async () => {
