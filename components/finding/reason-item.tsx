@@ -14,15 +14,17 @@ interface ReasonItemProps {
   reason: Pick<Finding, "code" | "level" | "title" | "text" | "clearsWhen" | "assumed" | "source">;
   /** Which bolt or part it is about: "bolt 3". */
   subject?: ReactNode;
+  /** Where several lists stand on one page: keeps the ids apart. */
+  idPrefix?: string;
   /** Margin bars or photos that belong to it. */
   children?: ReactNode;
 }
 
 /** One reason of a verdict: what was found, what was assumed, by which rule, and what would clear it. */
-export function ReasonItem({ number, reason, subject, children }: ReasonItemProps) {
+export function ReasonItem({ number, reason, subject, idPrefix, children }: ReasonItemProps) {
   return (
     <li
-      id={`reason-${number}`}
+      id={idPrefix ? `${idPrefix}-reason-${number}` : `reason-${number}`}
       className="keep-together grid scroll-mt-4 grid-cols-[auto_1fr] gap-x-3 border-t border-line py-4 target:bg-calm-ground"
     >
       <ReasonKey number={number} level={reason.level} />

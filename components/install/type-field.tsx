@@ -107,7 +107,12 @@ function JudgedAnswers({ judged }: { judged: Judged }) {
               >
                 <ReasonList label={`Reasons for ${USE_LABELS[use]}`}>
                   {answer.findings.map((reason, index) => (
-                    <ReasonItem key={`${reason.code}-${reason.title}`} number={index + 1} reason={reason} />
+                    <ReasonItem
+                      key={`${reason.code}-${reason.title}`}
+                      number={index + 1}
+                      reason={reason}
+                      idPrefix={use}
+                    />
                   ))}
                 </ReasonList>
               </Disclosure>

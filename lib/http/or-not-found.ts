@@ -1,5 +1,6 @@
 import "server-only";
 import { notFound } from "next/navigation";
+import { z } from "zod";
 import { AppError } from "@/lib/shared/errors";
 
 /** A page's read: absent and hidden both become the same "not found" page; everything else stays an error. */
@@ -10,4 +11,11 @@ export async function orNotFound<T>(read: Promise<T>): Promise<T> {
     if (error instanceof AppError && error.code === "not_found") notFound();
     throw error;
   }
+}
+
+/** An id in the address that cannot be one belongs to nothing. */
+export function idOrNotFound(id: string): string {
+  const parsed = z.uuid().safeParse(id);
+  if (!parsed.success) notFound();
+  return parsed.data;
 }

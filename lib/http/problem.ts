@@ -16,6 +16,8 @@ export const STATUS: Record<ErrorCode, number> = {
   unavailable: 503,
 };
 
+const STATUS_BY_NAME: Readonly<Record<string, number>> = STATUS;
+
 const TITLE: Record<ErrorCode, string> = {
   invalid_input: "The input has problems",
   not_signed_in: "Not signed in",
@@ -54,3 +56,8 @@ export function plainProblem(status: number, title: string, detail: string): Res
     headers: { "content-type": "application/problem+json", "cache-control": "no-store" },
   });
 }
+
+/** Status and title of every code, for the readable page. */
+export const ERROR_WORDS: Readonly<Record<string, { status: number; title: string }>> = Object.fromEntries(
+  Object.entries(TITLE).map(([code, title]) => [code, { status: STATUS_BY_NAME[code] ?? 500, title }]),
+);

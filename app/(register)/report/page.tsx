@@ -26,7 +26,7 @@ export default async function ReportPage({ searchParams }: ReportPageProps) {
       ...(placement && { placement }),
       ...(at && { at }),
     });
-    redirect(`/sign-in?callbackUrl=${encodeURIComponent(`/report?${back.toString()}`)}`);
+    redirect(`/sign-in?next=${encodeURIComponent(`/report?${back.toString()}`)}`);
   }
   const target = anchor ? await orNotFound(getReportTarget(actor, anchor, placement)) : null;
   return (
