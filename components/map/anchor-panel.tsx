@@ -75,13 +75,15 @@ export function AnchorPanel({ code, anchor, mayInstall, takeFocus, onClose }: An
 function PanelBody({ anchor, mayInstall }: { anchor: AnchorSummary; mayInstall: boolean }) {
   return (
     <>
-      <dl className="-mr-px grid grid-cols-2 overflow-hidden border-b border-frame">
+      <dl className="-mr-px grid grid-cols-2 overflow-hidden">
         <Cell name="Condition">
           <ConditionMark condition={anchor.condition} verdict={anchor.verdict} />
         </Cell>
         <Cell name="Verdict">
           {anchor.verdict ? <VerdictMark verdict={anchor.verdict} /> : <Unknown>not judged yet</Unknown>}
         </Cell>
+      </dl>
+      <dl className="-mr-px grid grid-cols-3 overflow-hidden border-b border-frame">
         <Cell name="Use">{sentence(usesLabel(anchor.uses))}</Cell>
         <Cell name="Site">{anchor.siteName}</Cell>
         <Cell name="Last check">

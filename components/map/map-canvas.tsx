@@ -49,6 +49,7 @@ export interface MapCanvasProps {
   gridStep: { lon: number; lat: number };
   start: Camera | { bounds: Bounds };
   mapRef: RefObject<MapRef | null>;
+  onReady: () => void;
   onLook: (look: Omit<MapLook, "step">, settled: boolean) => void;
   onPoint: (words: string | null) => void;
   onTarget: (target: Target) => void;
@@ -59,7 +60,8 @@ export function MapCanvas(props: MapCanvasProps) {
   const { palette, anchors, spans, all, chosen, start, mapRef, onLook, onPoint, onTarget } = props;
   const [settled, setSettled] = useState<Bounds | null>(null);
   const style = useMemo(() => groundStyle(palette, places()), [palette]);
-  const points = useMemo(() => anchorPoints(anchors), [anchors]);
+  // The chosen one stands beside its group, never under it.
+  const points = useMemo(() => anchorPoints(anchors.filter((one) => one !== chosen)), [anchors, chosen]);
   const soft = useMemo(() => softPlaces(anchors), [anchors]);
   const lines = useMemo(() => spanLines(spans, all), [spans, all]);
   const ring = useMemo(() => anchorPoints(chosen ? [chosen] : []), [chosen]);
@@ -89,7 +91,7 @@ export function MapCanvas(props: MapCanvasProps) {
       mapStyle={style}
       initialViewState={
         "bounds" in start
-          ? { bounds: start.bounds, fitBoundsOptions: { padding: 56, maxZoom: 15 } }
+          ? { bounds: start.bounds, fitBoundsOptions: { padding: 64, maxZoom: 15 } }
           : { latitude: start.lat, longitude: start.lon, zoom: start.zoom }
       }
       minZoom={1}
@@ -103,6 +105,7 @@ export function MapCanvas(props: MapCanvasProps) {
       onLoad={({ target }) => {
         target.touchZoomRotate.disableRotation();
         target.keyboard.disableRotation();
+        props.onReady();
         look(target, true);
       }}
       onResize={({ target }) => look(target, true)}

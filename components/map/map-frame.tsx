@@ -3,7 +3,7 @@
 import type { ReactNode } from "react";
 import type { Tick } from "@/lib/map/graticule";
 import { metresPerPixel, scaleBar } from "@/lib/map/scale-bar";
-import { formatDistanceM } from "@/lib/shared/format";
+import { formatQuantity } from "@/lib/shared/format";
 
 interface MapFrameProps {
   ticks: { top: readonly Tick[]; left: readonly Tick[] };
@@ -91,7 +91,7 @@ function Scale({ scale }: { scale: MapFrameProps["scale"] }) {
     <span className="grid w-[110px] gap-0.5">
       <span className="type-figure text-xs leading-none">
         <span className="sr-only">Length of the scale bar: </span>
-        {formatDistanceM(lengthM)}
+        {lengthM < 1000 ? formatQuantity(lengthM, "m") : formatQuantity(lengthM / 1000, "km")}
       </span>
       <svg aria-hidden="true" className="h-2 w-full text-text" fill="none" stroke="currentColor">
         <rect x="0.5" y="1.5" width={widthPx} height="5" strokeWidth="1" />

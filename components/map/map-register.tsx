@@ -94,18 +94,20 @@ function Register({ anchors, spans, installAreas }: MapRegisterProps) {
           onCamera={keepCamera}
           onChoose={choose}
           onSite={showSite}
+          panel={
+            code === null ? null : (
+              <div className="fixed inset-x-0 bottom-[calc(var(--nav-height)+env(safe-area-inset-bottom))] z-20 max-h-[58dvh] overflow-y-auto lg:absolute lg:inset-x-auto lg:-right-0.5 lg:-bottom-0.5 lg:max-h-[calc(100%-10rem)] lg:w-96">
+                <AnchorPanel
+                  code={code}
+                  anchor={chosen}
+                  mayInstall={chosen !== null && installAreas.includes(chosen.areaSlug)}
+                  takeFocus={byHand}
+                  onClose={() => choose(null)}
+                />
+              </div>
+            )
+          }
         />
-        {code === null ? null : (
-          <div className="fixed inset-x-0 bottom-[calc(var(--nav-height)+env(safe-area-inset-bottom))] z-20 max-h-[58dvh] overflow-y-auto lg:absolute lg:inset-x-auto lg:right-0 lg:bottom-0 lg:max-h-full lg:w-96">
-            <AnchorPanel
-              code={code}
-              anchor={chosen}
-              mayInstall={chosen !== null && installAreas.includes(chosen.areaSlug)}
-              takeFocus={byHand}
-              onClose={() => choose(null)}
-            />
-          </div>
-        )}
       </div>
       <section aria-labelledby="list-heading" className="mt-5 px-1">
         <h2 id="list-heading" className="mb-3">

@@ -1,7 +1,7 @@
 "use client";
 
 import dynamic from "next/dynamic";
-import { useCallback, useEffect, useMemo, useRef, useState } from "react";
+import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from "react";
 import type { GeoJSONSource } from "maplibre-gl";
 import type { MapRef } from "react-map-gl/maplibre";
 import type { MapLook } from "@/components/map/map-canvas";
@@ -31,17 +31,23 @@ interface MapSheetProps {
   onCamera: (camera: Camera) => void;
   onChoose: (code: string) => void;
   onSite: (slug: string) => void;
+  /** The chosen anchor in words, laid over the map. */
+  panel: ReactNode;
 }
 
 /** Close enough to tell the two ends of a short span apart. */
 const NEAR_ZOOM = 16.2;
 /** A rounded point is not worth a closer look than this. */
 const SOFT_ZOOM = 12;
+/** Room for tags at the edge. */
+const PADDING_PX = 64;
+/** Width of the panel beside the map. */
+const PANEL_PX = 384;
 const NOWHERE: Bounds = [-34.55, 46.74, -33.88, 47.07];
 
 /** The map in its frame, and what its keys and marks do. */
 export function MapSheet(props: MapSheetProps) {
-  const { anchors, all, chosen, wish, onCamera, onChoose, onSite } = props;
+  const { anchors, all, chosen, camera, wish, onCamera, onChoose, onSite } = props;
   const palette = usePalette();
   const mapRef = useRef<MapRef | null>(null);
   const [look, setLook] = useState<Omit<MapLook, "step"> | null>(null);
@@ -67,9 +73,12 @@ export function MapSheet(props: MapSheetProps) {
   );
   const onTarget = useCallback(
     (target: Target) => {
-      if (target.kind === "anchor") onChoose(target.code);
-      else if (target.kind === "place") onSite(target.site);
-      else if (target.kind === "group") void openGroup(mapRef.current, target);
+      if (target.kind === "anchor") {
+        onChoose(target.code);
+        uncover(mapRef.current, target);
+      }
+      if (target.kind === "place") onSite(target.site);
+      if (target.kind === "group") void openGroup(mapRef.current, target);
     },
     [onChoose, onSite],
   );
@@ -111,12 +120,16 @@ export function MapSheet(props: MapSheetProps) {
           gridStep={gridStep}
           start={start}
           mapRef={mapRef}
+          onReady={() => {
+            if (chosen && !camera) fulfil(mapRef.current, { anchor: chosen }, { durationMs: 0 });
+          }}
           onLook={onLook}
           onPoint={setPointed}
           onTarget={onTarget}
           onFail={() => setFailed(true)}
         />
       ) : null}
+      {props.panel}
     </MapFrame>
   );
 }
@@ -131,16 +144,38 @@ function startAt({ camera, chosen, anchors, all }: MapSheetProps): Camera | { bo
   return { bounds: boundsOf(anchors) ?? boundsOf(all) ?? NOWHERE };
 }
 
-function fulfil(map: MapRef | null, wish: Wish) {
+function fulfil(map: MapRef | null, wish: Wish, options: { durationMs?: number } = {}) {
   if (!map) return;
   if ("anchor" in wish) {
     const [lon, lat] = wish.anchor.point.coordinates;
     const least = wish.anchor.exact ? NEAR_ZOOM : SOFT_ZOOM;
-    map.easeTo({ center: [lon, lat], zoom: Math.max(map.getZoom(), least) });
+    const { durationMs } = options;
+    map.easeTo({
+      center: [lon, lat],
+      zoom: Math.max(map.getZoom(), least),
+      offset: besidePanel(map),
+      ...(durationMs === undefined ? {} : { duration: durationMs }),
+    });
     return;
   }
   const bounds = boundsOf(wish.around);
-  if (bounds) map.fitBounds(bounds, { padding: 56, maxZoom: 15 });
+  if (bounds) map.fitBounds(bounds, { padding: PADDING_PX, maxZoom: 15 });
+}
+
+/** From the middle of the map to the middle of what the panel leaves free. */
+function besidePanel(map: MapRef): [number, number] {
+  const { clientWidth, clientHeight } = map.getContainer();
+  return clientWidth > PANEL_PX * 1.6 ? [-PANEL_PX / 2, 0] : [0, -clientHeight / 4];
+}
+
+/** Moves the map when the panel would cover the mark that opened it. */
+function uncover(map: MapRef | null, { lon, lat }: { lon: number; lat: number }) {
+  if (!map) return;
+  const { clientWidth, clientHeight } = map.getContainer();
+  const at = map.project([lon, lat]);
+  const [right, up] = besidePanel(map);
+  const hidden = right === 0 ? at.y > clientHeight + 2 * up : at.x > clientWidth - PANEL_PX - 24;
+  if (hidden) map.easeTo({ center: [lon, lat], offset: [right, up] });
 }
 
 /** Comes as close as the group needs to fall apart. */

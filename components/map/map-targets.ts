@@ -6,7 +6,7 @@ import { MARKS } from "@/lib/map/marks";
 /** Something on the map that answers to hand or pointer. */
 export type Target =
   | { kind: "group"; clusterId: number; lon: number; lat: number; count: number; split: string }
-  | { kind: "anchor"; code: string; label: string; state: string }
+  | { kind: "anchor"; lon: number; lat: number; code: string; label: string; state: string }
   | { kind: "place"; site: string; name: string; count: number }
   | { kind: "span"; name: string; length: string };
 
@@ -37,13 +37,12 @@ export function nearestTarget(
   return nearest ? targetOf(nearest) : null;
 }
 
-function targetOf(feature: MapGeoJSONFeature): Target | null {
+function targetOf(feature: MapGeoJSONFeature): Target {
+  const [lon = 0, lat = 0] = feature.geometry.type === "Point" ? feature.geometry.coordinates : [];
   const p: Record<string, unknown> = feature.properties;
   const text = (key: string) => String(p[key] ?? "");
   switch (feature.layer.id) {
-    case CLUSTER_LAYER: {
-      if (feature.geometry.type !== "Point") return null;
-      const [lon = 0, lat = 0] = feature.geometry.coordinates;
+    case CLUSTER_LAYER:
       return {
         kind: "group",
         clusterId: Number(p.cluster_id),
@@ -52,11 +51,12 @@ function targetOf(feature: MapGeoJSONFeature): Target | null {
         count: Number(p.point_count),
         split: splitInWords(readCounts(p)),
       };
-    }
     case ANCHOR_LAYER: {
       const mark = MARKS.find((name) => name === p.mark);
       return {
         kind: "anchor",
+        lon,
+        lat,
         code: text("code"),
         label: text("label"),
         state: mark ? MAP_MARK_WORDS[mark] : "",

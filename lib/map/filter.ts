@@ -180,6 +180,21 @@ export function spansBetween<S extends { aCode: string; bCode: string }>(
   return spans.filter((span) => codes.has(span.aCode) || codes.has(span.bCode));
 }
 
+/** The sentence in short: "check first or worse, glued, any kind, within 1 km of the sea". */
+export function filterInWords(filter: MapFilter, siteName: string | null): string {
+  const { state, fixing, metal, use, sea, q } = filter;
+  const words = [
+    state && STATE_WORDS[state],
+    fixing && FIXING_WORDS[fixing],
+    metal && METAL_WORDS[metal],
+    use && `for ${USE_LABELS[use]}`,
+    sea && SEA_WORDS[sea],
+    siteName && `in ${siteName}`,
+    q.trim() === "" ? null : `named “${q.trim()}”`,
+  ].filter((part) => part !== null);
+  return words.length === 0 ? "every anchor" : words.join(", ");
+}
+
 export function isFiltered(filter: MapFilter): boolean {
   return (
     filter.q.trim() !== "" || Object.entries(filter).some(([key, value]) => key !== "q" && value !== null)

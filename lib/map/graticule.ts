@@ -56,3 +56,40 @@ export function graticuleLines(
     ],
   };
 }
+
+/** A degree written in the margin, at its distance from the left or top edge. */
+export interface Tick {
+  label: string;
+  atPx: number;
+}
+
+/** One label of a margin takes about this much room. */
+const LABEL_ROOM_PX = 104;
+
+/** The labels for the top and the left margin of a map that is not turned, and the steps they stand at. */
+export function frameTicks(
+  [west, south, east, north]: Bounds,
+  size: { widthPx: number; heightPx: number },
+): { top: Tick[]; left: Tick[]; step: { lon: number; lat: number } } {
+  const step = {
+    lon: graticuleStepMin(east - west, size.widthPx / LABEL_ROOM_PX),
+    lat: graticuleStepMin(north - south, size.heightPx / LABEL_ROOM_PX),
+  };
+  const [low, high] = [mercator(south), mercator(north)];
+  return {
+    step,
+    top: graticuleValues(west, east, step.lon).map((lon) => ({
+      label: formatDegrees(lon, "lon", step.lon),
+      atPx: ((lon - west) / (east - west)) * size.widthPx,
+    })),
+    left: graticuleValues(south, north, step.lat).map((lat) => ({
+      label: formatDegrees(lat, "lat", step.lat),
+      atPx: ((high - mercator(lat)) / (high - low)) * size.heightPx,
+    })),
+  };
+}
+
+/** Height of a parallel on the web's map, in radians of the equator. */
+function mercator(latDeg: number): number {
+  return Math.asinh(Math.tan((latDeg * Math.PI) / 180));
+}

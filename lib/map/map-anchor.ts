@@ -77,3 +77,18 @@ export function splitInWords(counts: MarkCounts): string {
     .map((mark) => `${counts[mark]} ${MAP_MARK_WORDS[mark]}`)
     .join(", ");
 }
+
+/** The counts of a group as the map's source hands them back. */
+export function readCounts(properties: Readonly<Record<string, unknown>>): MarkCounts {
+  const of = (mark: Mark) => {
+    const value = Number(properties[mark]);
+    return Number.isFinite(value) ? value : 0;
+  };
+  return {
+    removed: of("removed"),
+    in_service: of("in_service"),
+    not_enough_known: of("not_enough_known"),
+    check_first: of("check_first"),
+    out_of_use: of("out_of_use"),
+  };
+}

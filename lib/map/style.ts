@@ -1,9 +1,4 @@
-import type {
-  ExpressionSpecification,
-  FilterSpecification,
-  LayerSpecification,
-  StyleSpecification,
-} from "maplibre-gl";
+import type { ExpressionSpecification, LayerSpecification, StyleSpecification } from "maplibre-gl";
 import type { Palette } from "@/lib/map/palette";
 
 /** Names of the faces that are drawn on the map; the files are the ones the pages use. */
@@ -124,10 +119,11 @@ function ways(palette: Palette): LayerSpecification[] {
       id: "paths",
       filter: ofKind("path"),
       minzoom: 10,
+      layout: round,
       paint: {
         "line-color": palette.muted,
-        "line-width": byZoom(10, 0.8, 14, 1.4, 17, 2),
-        "line-dasharray": [4, 2.5],
+        "line-width": byZoom(10, 1.4, 14, 2, 17, 2.6),
+        "line-dasharray": [0.1, 2.6],
       },
     },
   ];
