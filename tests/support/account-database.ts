@@ -11,6 +11,7 @@ export function accountDatabase(name: string): () => Db {
   beforeAll(async () => {
     vi.stubEnv("NEXTAUTH_SECRET", "only-for-tests-only-for-tests-only-for-tests");
     vi.stubEnv("BYSSUS_URL", "https://register.example");
+    vi.stubEnv("BYSSUS_DEMO", "0");
     vi.stubEnv("LOG_LEVEL", "silent");
     own = await freshDatabase(name);
     globalThis.byssusPool = { db: own.db, close: async () => undefined };
