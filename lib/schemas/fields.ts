@@ -12,7 +12,8 @@ export function text(max: number, min = 1) {
     .string("Text is wanted here.")
     .trim()
     .min(min, min === 1 ? "This is needed." : `At least ${min} characters.`)
-    .max(max, `At most ${max} characters.`);
+    .max(max, `At most ${max} characters.`)
+    .refine((value) => !/[^\P{Cc}\n\r\t]/u.test(value), "There is a character in it that cannot be kept.");
 }
 
 /** A note: may be empty. */

@@ -34,7 +34,8 @@ import { logInstallInput, logInstallSeriesInput } from "@/lib/schemas/bolt";
 import { openReboltJobInput } from "@/lib/schemas/rebolt";
 import { fileReportInput, handCheckInput } from "@/lib/schemas/report";
 import { batchWarningInput, closureInput, createAreaInput, createSiteInput } from "@/lib/schemas/steward";
-import { NOON, later } from "@/tests/support/people";
+import { first, installOf, reportOf, smallJpeg } from "@/tests/support/inputs";
+import { NOON } from "@/tests/support/people";
 import type { Register } from "@/tests/support/register";
 
 /** The least that may run a command: `own`: bolters only what is given to them. */
@@ -44,13 +45,6 @@ interface CommandCase {
   name: string;
   needs: Needs;
   run: (ctx: CommandContext, r: Register) => Promise<unknown>;
-}
-
-/** The first of a list that has one. */
-export function first<T>(list: readonly T[]): T {
-  const [one] = list;
-  if (one === undefined) throw new Error("The list is empty.");
-  return one;
 }
 
 const version = 1;
@@ -300,42 +294,3 @@ export const COMMANDS: readonly CommandCase[] = [
     run: (ctx, r) => updateSite(ctx, { id: r.siteId, version, change: { ucsMpa: 60 } }),
   },
 ];
-
-/** A replacement in the first hole of the anchor, set two hours ago. */
-export function installOf(r: Register, more: Record<string, unknown> = {}) {
-  return {
-    id: v7(),
-    anchorId: r.anchor.id,
-    placementId: first(r.anchor.placementIds),
-    boltTypeId: r.typeId,
-    method: "epoxy",
-    adhesiveId: r.adhesiveId,
-    installedOn: "2026-06-01",
-    installedAt: later(-120).toISOString(),
-    glueTempC: 21,
-    rockTempC: 12,
-    embedmentMm: 100,
-    ...more,
-  };
-}
-
-/** A rust report on the first bolt; `more` makes another of it. */
-export function reportOf(r: Register, more: Record<string, unknown>) {
-  return {
-    id: v7(),
-    anchorId: r.anchor.id,
-    placementId: first(r.anchor.placementIds),
-    kind: "corrosion",
-    depth: "seen",
-    observedAt: later(-30).toISOString(),
-    measured: { rustGrade: 2 },
-    ...more,
-  };
-}
-
-async function smallJpeg(): Promise<Uint8Array> {
-  const { default: sharp } = await import("sharp");
-  return sharp({ create: { width: 40, height: 30, channels: 3, background: "#886644" } })
-    .jpeg()
-    .toBuffer();
-}

@@ -11,7 +11,7 @@ import { strikeRecord } from "@/lib/commands/strike-record";
 import { logInstallInput } from "@/lib/schemas/bolt";
 import { fileReportInput, handCheckInput } from "@/lib/schemas/report";
 import { accountDatabase } from "@/tests/support/account-database";
-import { first, installOf, reportOf } from "@/tests/support/commands";
+import { first, installOf, reportOf } from "@/tests/support/inputs";
 import { addArea, addCast, addPerson, contextOf, later, NOON } from "@/tests/support/people";
 import { addPhotoRow, addRegister } from "@/tests/support/register";
 
