@@ -31,7 +31,6 @@ const role = z.enum(ROLES, "Choose a role.");
 const version = z.coerce.number().int().positive();
 
 export const emailOnly = z.object({ email });
-export const secretOnly = z.object({ secret });
 export const idOnly = z.object({ id });
 export const nothingSent = z.object({});
 
