@@ -8,8 +8,8 @@ import { Disclosure } from "@/components/ui/disclosure";
 import { NumberField } from "@/components/ui/number-field";
 import { SelectField } from "@/components/ui/select-field";
 import { TextField } from "@/components/ui/text-field";
-import { HOLE_FATE_LABELS, PLACEMENT_ROLE_LABELS, sentence, SIDE_LABELS } from "@/lib/domain/labels";
-import { HOLE_FATES, PLACEMENT_ROLES, SIDES } from "@/lib/domain/vocabulary";
+import { PLACEMENT_ROLE_LABELS, sentence, SIDE_LABELS } from "@/lib/domain/labels";
+import { PLACEMENT_ROLES, SIDES } from "@/lib/domain/vocabulary";
 
 interface PlacementFieldsProps {
   anchor: InstallAnchor;
@@ -63,8 +63,8 @@ export function PlacementFields({
 function Replaces({ prefix, kept, errorOf }: { prefix: string; kept: Kept; errorOf: ErrorOf }) {
   const p = (name: string) => prefix + name;
   return (
-    <div className="grid gap-5 border-l-4 border-warn-fill pl-4 sm:grid-cols-2">
-      <p className="text-sm text-muted sm:col-span-2">
+    <div className="grid gap-5 border-l-4 border-warn-fill pl-4">
+      <p className="text-sm text-muted">
         The bolt that is there now is recorded as removed and stays in the history of this hole.
       </p>
       <TextField
@@ -72,14 +72,6 @@ function Replaces({ prefix, kept, errorOf }: { prefix: string; kept: Kept; error
         label="Why it came out"
         defaultValue={kept[p("removedWhy")]}
         error={errorOf(p("removedWhy"))}
-      />
-      <SelectField
-        name={p("holeFate")}
-        label="What became of its hole"
-        emptyLabel="Not known"
-        choices={HOLE_FATES.map((value) => ({ value, label: sentence(HOLE_FATE_LABELS[value]) }))}
-        defaultValue={kept[p("holeFate")] ?? "reused"}
-        error={errorOf(p("holeFate"))}
       />
     </div>
   );

@@ -21,6 +21,10 @@ interface PhotoPickerProps {
   label?: string;
   hint?: string;
   error?: string;
+  /** What an error summary links to. */
+  id?: string;
+  /** At least one is needed: does not say "optional". */
+  needed?: boolean;
 }
 
 /** Camera or files; each photo with its own state, so one that is refused does not hold up the others. */
@@ -32,12 +36,16 @@ export function PhotoPicker({
   label = "Photos",
   hint,
   error,
+  id,
+  needed = false,
 }: PhotoPickerProps) {
-  const inputId = useId();
+  const ownId = useId();
+  const inputId = id ?? ownId;
   return (
     <div className="grid gap-2">
       <label htmlFor={inputId} className="text-base font-semibold">
-        {label} <span className="font-normal text-muted">(optional)</span>
+        {label}
+        {needed ? null : <span className="font-normal text-muted"> (optional)</span>}
       </label>
       <p id={`${inputId}-hint`} className="text-sm text-muted">
         {hint ??

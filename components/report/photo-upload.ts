@@ -13,7 +13,7 @@ export function sendPhoto(
     request.upload.onprogress = (event) => {
       if (event.lengthComputable) onProgress(event.loaded / event.total);
     };
-    request.onerror = () => resolve("No connection. The report is stored; try the photo again.");
+    request.onerror = () => resolve("No connection. The photo is still here; try again.");
     request.onload = () => resolve(request.status < 300 ? null : refusalOf(request.responseText));
     request.send(body);
   });

@@ -9,6 +9,7 @@ import {
   listJobRows,
   listMembers,
 } from "@/db/repositories/queue-read";
+import { standsSince } from "@/lib/domain/condition/stands-since";
 import type { JobState } from "@/lib/domain/vocabulary";
 import { can, roleIn } from "@/lib/policy/can";
 import { findingsView, photoViewOf } from "@/lib/queries/anchor-view";
@@ -127,6 +128,7 @@ export async function getJob(actor: Actor, id: string): Promise<JobView> {
         condition: check.condition,
         verdict: bolt?.evaluation?.verdict ?? null,
         inJob: row.placementNumbers.includes(check.placementNumber),
+        carriedEvent: bolt !== undefined && stoodAt(bolt.bolt, row.anchorOutOfUseSince),
         handCheckedAt: check.handCheckedAt === null ? null : new Date(check.handCheckedAt).toISOString(),
         handCheckHasPhoto: check.handCheckHasPhoto,
       };
@@ -135,4 +137,10 @@ export async function getJob(actor: Actor, id: string): Promise<JobView> {
     members: members.map(({ userId, name, role }) => ({ userId, name, role })),
     secondPersonForReturn: policy.secondPersonForReturn,
   };
+}
+
+function stoodAt(bolt: Parameters<typeof standsSince>[0], event: Date | null): boolean {
+  if (event === null) return false;
+  const stands = standsSince(bolt);
+  return stands === null || stands <= event.toISOString();
 }

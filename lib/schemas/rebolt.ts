@@ -1,6 +1,8 @@
 import { z } from "zod";
 import { logInstallSeriesInput } from "@/lib/schemas/bolt";
-import { day, id, number, oneOf, text } from "@/lib/schemas/fields";
+import { day, id, number, oneOf, text, whole } from "@/lib/schemas/fields";
+import { formInput } from "@/lib/schemas/form-input";
+import { spreadCommon } from "@/lib/schemas/series";
 import { HOLE_FATES, JOB_OUTCOMES } from "@/lib/domain/vocabulary";
 
 export const openReboltJobInput = z
@@ -47,3 +49,25 @@ export type DecideJobInput = z.output<typeof decide>;
 export type AssignJobInput = z.output<typeof assign>;
 export type MoveJobInput = z.output<typeof move>;
 export type CompleteJobInput = z.output<typeof complete>;
+
+/** The entry a form is about, in the version its reader saw. What it does is decided by where it is sent. */
+const ref = { id, version: whole(1, 1_000_000_000) };
+export const decideJobForm = formInput(decide.omit({ action: true }).extend(ref));
+export const moveJobForm = formInput(move.omit({ action: true }).extend(ref));
+/** Nobody ticked sends nothing: the job is taken back. */
+export const assignJobForm = formInput(
+  assign.omit({ action: true }).extend({ ...ref, userIds: assign.shape.userIds.default([]) }),
+);
+/** What was installed comes as from the series form, under `common` and `bolts`. */
+export const completeJobForm = z.preprocess(
+  (value) => {
+    const { bolts, ...rest } = spreadCommon(value);
+    return bolts.length > 0 ? { ...rest, install: bolts } : rest;
+  },
+  formInput(complete.omit({ action: true }).extend(ref)),
+);
+
+/** Which part of the queue a page shows; anything else is what is to be done. */
+export const QUEUE_SHOWS = ["open", "mine", "done", "turned_down"] as const;
+export const queueShow = z.enum(QUEUE_SHOWS).catch("open");
+export type QueueShow = z.output<typeof queueShow>;

@@ -2,7 +2,7 @@ import "server-only";
 import type { EvidenceRows } from "@/db/repositories/evidence";
 import { handCheckOf, openFacts, type ReportsByBolt } from "@/lib/commands/evaluation/reports-by-bolt";
 import type { AnchorForCondition, BoltForCondition, Decision } from "@/lib/domain/condition/derive-condition";
-import { span } from "@/lib/domain/finding/dates";
+import { standsSince } from "@/lib/domain/condition/stands-since";
 
 type BoltEntry = EvidenceRows["bolts"][number];
 
@@ -47,22 +47,6 @@ function boltForCondition(
     handCheckedAt: handCheckOf(bolt.id, about)?.report.observedAt.toISOString() ?? null,
     decided: decisionOf(bolt),
   };
-}
-
-/**
- * Since when it stands in its hole. One that was logged on the day it was set stands since it was logged; a
- * date known less well counts from its earliest day, which asks for a check rather than sparing one.
- */
-export function standsSince({
-  installedOn,
-  installedOnPrecision,
-  createdAt,
-}: BoltEntry["bolt"]): string | null {
-  if (installedOn === null) return null;
-  const logged = createdAt.toISOString();
-  if (installedOnPrecision === "day" && logged.startsWith(installedOn)) return logged;
-  const { earliest } = span(installedOn, installedOnPrecision);
-  return earliest === null ? null : `${earliest}T00:00:00.000Z`;
 }
 
 function decisionOf(row: {

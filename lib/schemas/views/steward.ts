@@ -55,6 +55,8 @@ export const jobBoltView = z.object({
   condition: conditionView,
   verdict: verdictView.nullable(),
   inJob: z.boolean(),
+  /** It stood there when the anchor was taken out of use: it is checked by hand before the anchor comes back. */
+  carriedEvent: z.boolean(),
   /** Hand-checked and found sound after the event, with a photo. */
   handCheckedAt: instantView.nullable(),
   handCheckHasPhoto: z.boolean(),
