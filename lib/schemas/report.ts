@@ -1,5 +1,6 @@
 import { z } from "zod";
 import { id, instant, lonLat, note, oneOf, text, whole, yesNo } from "@/lib/schemas/fields";
+import { formInput } from "@/lib/schemas/form-input";
 import { CONDITIONS, DEPTHS, REPORT_KINDS } from "@/lib/domain/vocabulary";
 
 /** What was seen. The measurements that fit the kind are checked by the command, which names each that does not. */
@@ -73,3 +74,6 @@ export const decideConditionInput = z.strictObject({
   reason: text(1000, 3),
 });
 export type DecideConditionInput = z.output<typeof decideConditionInput>;
+
+/** The answer as the form sends it, with the report it is about in the version its reader saw. */
+export const handleReportForm = formInput(handleReportInput.extend({ id, version: whole(1, 1_000_000_000) }));

@@ -1,8 +1,11 @@
 import type { Metadata } from "next";
+import { answerReport } from "@/app/(register)/reports/[id]/actions";
+import { AnswerForm } from "@/components/report/answer-form";
 import { ReportReceipt } from "@/components/report/report-receipt";
 import { ReportSheet } from "@/components/report/report-sheet";
 import { getActor } from "@/lib/auth/get-actor";
 import { idOrNotFound, orNotFound } from "@/lib/http/or-not-found";
+import { can } from "@/lib/policy/can";
 import { getReport } from "@/lib/queries/reports";
 
 interface ReportPageProps {
@@ -13,8 +16,10 @@ interface ReportPageProps {
 export const metadata: Metadata = { title: "Report" };
 
 export default async function ReportPage({ params, searchParams }: ReportPageProps) {
-  const report = await orNotFound(getReport(await getActor(), idOrNotFound((await params).id)));
+  const actor = await getActor();
+  const report = await orNotFound(getReport(actor, idOrNotFound((await params).id)));
   const { sent } = await searchParams;
+  const answers = report.state === "open" && can(actor, "report.handle", { areaId: report.areaId });
   return (
     <>
       {sent ? (
@@ -22,7 +27,10 @@ export default async function ReportPage({ params, searchParams }: ReportPagePro
           <ReportReceipt report={report} />
         </div>
       ) : null}
-      <ReportSheet report={report} />
+      <ReportSheet
+        report={report}
+        answer={answers ? <AnswerForm report={report} action={answerReport} /> : undefined}
+      />
     </>
   );
 }
