@@ -23,21 +23,18 @@ async function main() {
   await ensurePackages();
   const databaseUrl = await openDatabase({ mode, givenUrl });
   clearLeftover();
+  const nodeEnv = dev ? "development" : "production";
+  const envAt = (port, sinkPort) =>
+    applicationEnv({ mode, databaseUrl, address: addressOf(host, port), sinkPort, nodeEnv });
+  await fillDatabase({ mode, env: envAt(settings.port, 0) });
+  if (dev) copyMapWorker();
+  else await ensureBuild(envAt(settings.port, 0));
+  if (stopping) return;
+  // Only now: a port that was free before a build may be taken after it.
   const port = await freePort(settings.port);
   if (port !== settings.port) say(`Port ${settings.port} is taken by another program; using ${port}.`);
-  const address = `http://${host === "0.0.0.0" ? "127.0.0.1" : host}:${port}`;
-  const sinkPort = await freePort(2525);
-  const env = applicationEnv({
-    mode,
-    databaseUrl,
-    address,
-    sinkPort,
-    nodeEnv: dev ? "development" : "production",
-  });
-  await fillDatabase({ mode, env });
-  if (dev) copyMapWorker();
-  else await ensureBuild(env);
-  if (stopping) return;
+  const address = addressOf(host, port);
+  const env = envAt(port, await freePort(2525));
   say("Starting the application.");
   server = startServer({ dev, host, port, env });
   remember({ server: server.pid, address });
@@ -46,6 +43,8 @@ async function main() {
   await server.exited;
   if (!stopping) throw new Error("the application ended by itself; its last lines are above.");
 }
+
+const addressOf = (host, port) => `http://${host === "0.0.0.0" ? "127.0.0.1" : host}:${port}`;
 
 async function tell({ address, mode, env }) {
   heading(`Ready after ${since(begun)}: ${address}`);

@@ -39,7 +39,7 @@ export async function untilAnswering(server, url, { seconds = 90 } = {}) {
   while (Date.now() < end) {
     if (server.hasEnded()) throw new Error("the application ended while starting; its last lines are above.");
     const status = await statusOf(url);
-    if (status !== null && status < 500) return;
+    if (status !== null && status < 500 && !server.hasEnded()) return;
     await sleep(250);
   }
   throw new Error(`the application did not answer on ${url} within ${seconds} seconds.`);

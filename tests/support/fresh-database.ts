@@ -64,7 +64,7 @@ function databaseAddress(address: string, database: string): string {
 }
 
 /** The test command sets DATABASE_URL; a single file run by hand uses the development cluster. */
-function serverAddress(): string {
+export function serverAddress(): string {
   const file = path.join(process.cwd(), ".local", "dev-url");
   const address = process.env.DATABASE_URL ?? (existsSync(file) ? readFileSync(file, "utf8").trim() : "");
   if (address === "")
