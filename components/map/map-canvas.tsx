@@ -36,7 +36,6 @@ export interface MapLook {
   heightPx: number;
   zoom: number;
   lat: number;
-  step: { lon: number; lat: number } | null;
 }
 
 export interface MapCanvasProps {
@@ -50,7 +49,8 @@ export interface MapCanvasProps {
   start: Camera | { bounds: Bounds };
   mapRef: RefObject<MapRef | null>;
   onReady: () => void;
-  onLook: (look: Omit<MapLook, "step">, settled: boolean) => void;
+  onLook: (look: MapLook) => void;
+  onCamera: (camera: Camera) => void;
   onPoint: (words: string | null) => void;
   onTarget: (target: Target) => void;
   onFail: () => void;
@@ -74,7 +74,7 @@ export function MapCanvas(props: MapCanvasProps) {
   const look = useCallback(
     (map: maplibregl.Map, done: boolean) => {
       const seen = lookOf(map);
-      onLook(seen, done);
+      onLook(seen);
       if (done) setSettled(seen.bounds);
       if (done && document.activeElement === map.getCanvas()) {
         const middle = nearestTarget(map, middleOf(map), MIDDLE_PX);
@@ -102,15 +102,13 @@ export function MapCanvas(props: MapCanvasProps) {
       attributionControl={false}
       locale={{ "Map.Title": CANVAS_NAME }}
       style={{ position: "absolute", inset: 0 }}
-      onLoad={({ target }) => {
-        target.touchZoomRotate.disableRotation();
-        target.keyboard.disableRotation();
-        props.onReady();
-        look(target, true);
-      }}
       onResize={({ target }) => look(target, true)}
       onMove={({ target }) => look(target, false)}
-      onMoveEnd={({ target }) => look(target, true)}
+      onMoveEnd={({ target }) => {
+        look(target, true);
+        const { lat, lng: lon } = target.getCenter();
+        props.onCamera({ lat, lon, zoom: target.getZoom() });
+      }}
       onMouseMove={({ target, point }) => {
         const found = nearestTarget(target, point);
         target.getCanvas().style.cursor = found ? "pointer" : "";
@@ -127,6 +125,14 @@ export function MapCanvas(props: MapCanvasProps) {
     >
       <Pictures palette={palette} />
       <EnterChooses onTarget={onTarget} />
+      <Ready
+        onReady={(map) => {
+          map.touchZoomRotate.disableRotation();
+          map.keyboard.disableRotation();
+          look(map, true);
+          props.onReady();
+        }}
+      />
       <Source id="graticule" type="geojson" data={grid}>
         <Layer {...gridLayer(palette)} />
       </Source>
@@ -191,6 +197,16 @@ function Pictures({ palette }: { palette: Palette }) {
   return null;
 }
 
+/** Once, as soon as there is a map: long before every tile has come. */
+function Ready({ onReady }: { onReady: (map: maplibregl.Map) => void }) {
+  const { current: map } = useMap();
+  const latest = useRef(onReady);
+  useEffect(() => {
+    if (map) latest.current(map.getMap());
+  }, [map]);
+  return null;
+}
+
 /** The keyboard's click: the mark nearest to the middle of the map. */
 function EnterChooses({ onTarget }: { onTarget: (target: Target) => void }) {
   const { current: map } = useMap();
@@ -214,7 +230,7 @@ function middleOf(map: maplibregl.Map) {
   return { x: clientWidth / 2, y: clientHeight / 2 };
 }
 
-function lookOf(map: maplibregl.Map): Omit<MapLook, "step"> {
+function lookOf(map: maplibregl.Map): MapLook {
   const seen = map.getBounds();
   const { clientWidth, clientHeight } = map.getContainer();
   return {

@@ -50,7 +50,7 @@ export function MapSheet(props: MapSheetProps) {
   const { anchors, all, chosen, camera, wish, onCamera, onChoose, onSite } = props;
   const palette = usePalette();
   const mapRef = useRef<MapRef | null>(null);
-  const [look, setLook] = useState<Omit<MapLook, "step"> | null>(null);
+  const [look, setLook] = useState<MapLook | null>(null);
   const [pointed, setPointed] = useState<string | null>(null);
   const [failed, setFailed] = useState(false);
   const [start] = useState<Camera | { bounds: Bounds }>(() => startAt(props));
@@ -63,14 +63,6 @@ export function MapSheet(props: MapSheetProps) {
     if (wish) fulfil(mapRef.current, wish);
   }, [wish]);
 
-  const onLook = useCallback(
-    (seen: Omit<MapLook, "step">, settled: boolean) => {
-      setLook(seen);
-      const centre = mapRef.current?.getCenter();
-      if (settled && centre) onCamera({ lat: centre.lat, lon: centre.lng, zoom: seen.zoom });
-    },
-    [onCamera],
-  );
   const onTarget = useCallback(
     (target: Target) => {
       if (target.kind === "anchor") {
@@ -123,7 +115,8 @@ export function MapSheet(props: MapSheetProps) {
           onReady={() => {
             if (chosen && !camera) fulfil(mapRef.current, { anchor: chosen }, { durationMs: 0 });
           }}
-          onLook={onLook}
+          onLook={setLook}
+          onCamera={onCamera}
           onPoint={setPointed}
           onTarget={onTarget}
           onFail={() => setFailed(true)}
