@@ -9,6 +9,7 @@ import { clearLeftover, forget, remember } from "./lib/running.mjs";
 import { fail, heading, say, since } from "./lib/say.mjs";
 import { startServer, untilAnswering } from "./lib/server.mjs";
 import { applicationEnv, readSettings } from "./lib/settings.mjs";
+import { whenStopped } from "./lib/stopping.mjs";
 
 const dev = process.argv.includes("--dev");
 const begun = Date.now();
@@ -66,21 +67,14 @@ async function cleanUp() {
   leaveDatabase();
 }
 
-for (const [signal, code] of [
-  ["SIGINT", 130],
-  ["SIGTERM", 143],
-  ["SIGHUP", 129],
-]) {
-  process.on(signal, () => {
-    if (stopping) return;
-    stopping = true;
-    say("Stopping.");
-    stopRunning("SIGTERM");
-    cleanUp()
-      .catch(fail)
-      .finally(() => process.exit(code));
-  });
-}
+whenStopped((code) => {
+  stopping = true;
+  say("Stopping.");
+  stopRunning("SIGTERM");
+  cleanUp()
+    .catch(fail)
+    .finally(() => process.exit(code));
+});
 
 try {
   await main();

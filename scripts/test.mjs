@@ -16,6 +16,7 @@ import { stopRunning } from "./lib/run.mjs";
 import { fail, heading, say, since } from "./lib/say.mjs";
 import { startServer, untilAnswering } from "./lib/server.mjs";
 import { applicationEnv } from "./lib/settings.mjs";
+import { whenStopped } from "./lib/stopping.mjs";
 
 /** The seed of the property tests where a run has to come out the same every time. */
 const CI_SEED = "20260601";
@@ -113,16 +114,13 @@ async function cleanUp() {
   remove(home);
 }
 
-for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) {
-  process.on(signal, () => {
-    if (stopping) return;
-    stopping = true;
-    stopRunning("SIGTERM");
-    cleanUp()
-      .catch(fail)
-      .finally(() => process.exit(1));
-  });
-}
+whenStopped((code) => {
+  stopping = true;
+  stopRunning("SIGTERM");
+  cleanUp()
+    .catch(fail)
+    .finally(() => process.exit(code));
+});
 
 try {
   await main();
