@@ -267,7 +267,7 @@ export function metalLabel(metal: string | null): string {
   if (metal === null) return "metal not known";
   const grade = /^ti-(\d)$/.exec(metal)?.[1];
   if (grade !== undefined) return `titanium grade ${grade}`;
-  return metal.replace("-", " ");
+  return metal === "hot-dip-galvanised" ? "hot-dip galvanised" : metal.replace("-", " ");
 }
 
 /** The metals a form offers, in words. */
