@@ -22,17 +22,19 @@ export function FittingList({ fittings }: { fittings: AnchorSheet["fittings"] })
         <li key={fitting.id}>
           <MarginBar
             label={`${sentence(FITTING_KIND_LABELS[fitting.kind])}, ${metalLabel(fitting.metal)}`}
-            value={fitting.diameterLeftMm ?? fitting.diameterMm}
+            value={fitting.diameterLeftMm}
             limit={fitting.diameterMm === null ? null : fitting.diameterMm * WORN_OUT}
             unit="mm"
             digits={1}
             kind="atLeast"
             limitLabel="worn out below"
           >
-            {fitting.diameterLeftMm === null ? "Diameter when new; wear not measured." : null}
-            {fitting.diameterLeftMm !== null && fitting.diameterMm !== null
-              ? `${fitting.diameterMm} mm when new.`
-              : null}
+            {fitting.diameterMm === null ? null : (
+              <>
+                <Quantity value={fitting.diameterMm} unit="mm" /> when new
+                {fitting.diameterLeftMm === null ? "; nobody has measured what is left." : "."}
+              </>
+            )}
             {fitting.placementNumber === null ? "" : ` On placement ${fitting.placementNumber}.`}
             {fitting.replaceable ? "" : " Cannot be replaced without a new bolt."}
             {fitting.note ? ` ${fitting.note}` : ""}

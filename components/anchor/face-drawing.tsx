@@ -30,7 +30,7 @@ export function FaceDrawing({
         viewBox={`0 0 ${drawing.width} ${drawing.height}`}
         role="img"
         aria-labelledby={`${id}-name`}
-        className="block h-auto w-full border border-frame bg-surface font-label tracking-wide text-text [font-stretch:80%] print:h-[120mm] print:w-auto print:max-w-full"
+        className="block h-auto w-full border border-frame bg-surface font-label tracking-wide text-text [font-stretch:80%] print:max-h-[120mm]"
       >
         <title id={`${id}-name`}>{`${name}. The list below says what it shows.`}</title>
         <FaceRock drawing={drawing} id={id} />

@@ -21,7 +21,18 @@ export function faceInputOf(sheet: AnchorSheet): FaceInput {
     faceDipDeg: sheet.faceDipDeg,
     designAzimuthDeg: sheet.designAzimuthDeg,
     designElevationDeg: sheet.designElevationDeg,
-    reasons: sheet.findings,
+    reasons: onceAtEach(sheet.findings),
     isRow: sheet.rowName !== null,
   };
+}
+
+/** A reason stands once beside a placement, however many findings of that placement share it. */
+function onceAtEach(findings: AnchorSheet["findings"]): FaceInput["reasons"] {
+  const byPlace = new Map(
+    findings.map(({ number, level, placementNumber }) => [
+      `${number}/${placementNumber ?? ""}`,
+      { number, level, placementNumber },
+    ]),
+  );
+  return [...byPlace.values()];
 }

@@ -1,80 +1,101 @@
+import { PlaceClass } from "@/components/anchor/place-class";
 import { Fact, Facts } from "@/components/ui/facts";
 import { Quantity } from "@/components/ui/quantity";
-import { WASHING_LABELS } from "@/lib/domain/labels";
+import { RIGGING_LABELS, sentence, WASHING_LABELS } from "@/lib/domain/labels";
 import type { AnchorSheet } from "@/lib/schemas/views/anchor";
-import { formatBearingDeg, formatDistanceM, formatQuantity, MINUS } from "@/lib/shared/format";
+import { formatBearingDeg, formatDistanceM, formatQuantity } from "@/lib/shared/format";
 
-/** Where it is and what the place does to metal: each number with its source and doubt. */
+/** What the place does to metal, and how it is meant to be rigged: each number with its source and doubt. */
 export function PlaceNote({ sheet }: { sheet: AnchorSheet }) {
-  const [lon, lat] = sheet.point.coordinates;
-  if (!sheet.exact) {
-    return (
-      <p className="max-w-prose border-l-4 border-info-fill bg-info-ground px-4 py-3">
-        The group keeps this place to its members. You see the name and a point rounded to about 1 km;
-        distances, bearings and pictures are left out.
-      </p>
-    );
-  }
-  const { sea, placeClass } = sheet;
   return (
-    <Facts>
-      <Fact name="Point">
-        <span className="type-code">
-          {lat.toFixed(5)}, {lon.toFixed(5)}
-        </span>
-        {sheet.pointErrorM === null ? "" : ` ± ${formatQuantity(sheet.pointErrorM, "m")}`}
-        {sheet.elevationM === null
-          ? ""
-          : `, ${formatQuantity(sheet.elevationM, "m", { digits: 0 })} above the sea`}
-      </Fact>
-      <Fact name="Design pull">
-        {sheet.designAzimuthDeg === null ? (
-          <span className="text-muted">not recorded</span>
-        ) : (
-          <>
-            {formatBearingDeg(sheet.designAzimuthDeg)}
-            {sheet.designElevationDeg === null
+    <div className="grid items-start gap-x-10 gap-y-5 lg:grid-cols-2 print:grid-cols-2 print:gap-x-5">
+      <Facts>
+        {sheet.exact ? <Whereabouts sheet={sheet} /> : null}
+        <Fact name="Washing">
+          {sheet.washing ? WASHING_LABELS[sheet.washing] : <span className="text-muted">not known</span>}
+        </Fact>
+        <Fact name="Rock">
+          {sheet.site.rockType ?? <span className="text-muted">not recorded</span>}
+          {sheet.site.ucsMpa === null
+            ? ""
+            : `, ${formatQuantity(sheet.site.ucsMpa, "MPa")} (${sheet.site.ucsBasis ?? "basis not recorded"})`}
+        </Fact>
+        <Rigging rigging={sheet.rigging} />
+        {sheet.rowName ? (
+          <Fact name="Row">
+            {sheet.rowName}
+            {sheet.rowLengthM === null
               ? ""
-              : `, ${formatQuantity(sheet.designElevationDeg, "°", { signed: true })} to level`}
-          </>
-        )}
-      </Fact>
+              : `, ${formatQuantity(sheet.rowLengthM, "m", { digits: 0 })} long`}
+          </Fact>
+        ) : null}
+        {sheet.note ? <Fact name="Note">{sheet.note}</Fact> : null}
+      </Facts>
+      {sheet.exact ? <PlaceClass placeClass={sheet.placeClass} /> : null}
+    </div>
+  );
+}
+
+/** Everything the place could be found by. */
+function Whereabouts({ sheet }: { sheet: AnchorSheet }) {
+  const { sea } = sheet;
+  return (
+    <>
       <Fact name="To the sea">
         {sea ? (
           <>
-            {formatDistanceM(sea.distanceM)} ± <Quantity value={sea.errorM} unit="m" digits={0} />,{" "}
-            {sea.source === "coast" ? "from the area's own coast line" : "measured by hand"}
+            <span className="type-figure">
+              {formatDistanceM(sea.distanceM)} ± {formatQuantity(sea.errorM, "m", { digits: 0 })}
+            </span>
+            , {sea.source === "coast" ? "from the area's own coast line" : "measured by hand"}
             {sea.note ? `; ${sea.note}` : ""}
           </>
         ) : (
           <span className="text-muted">not known</span>
         )}
       </Fact>
-      <Fact name="Washing">
-        {sheet.washing ? WASHING_LABELS[sheet.washing] : <span className="text-muted">not known</span>}
+      <Fact name="Position">
+        {sheet.pointErrorM === null
+          ? "error not recorded"
+          : `within ± ${formatQuantity(sheet.pointErrorM, "m")}`}
+        {sheet.elevationM === null
+          ? ""
+          : `, ${formatQuantity(sheet.elevationM, "m", { digits: 0 })} above the sea`}
       </Fact>
-      <Fact name="Place class">
-        {placeClass ? (
-          <>
-            CRF {signed(placeClass.f1)} {signed(placeClass.f2)} {signed(placeClass.f3)} ={" "}
-            {signed(placeClass.crf)}, so stainless steel of class <strong>{placeClass.crc}</strong> or better
-            (EN 1993-1-4, Annex A)
-          </>
+      <Fact name="Design load">
+        {sheet.designAzimuthDeg === null ? (
+          <span className="text-muted">not recorded</span>
         ) : (
-          <span className="text-muted">not known while the distance to the sea is not</span>
+          <span className="type-figure">
+            {formatBearingDeg(sheet.designAzimuthDeg)} true
+            {sheet.designElevationDeg === null
+              ? ""
+              : `, ${formatQuantity(sheet.designElevationDeg, "°", { signed: true })} to level`}
+          </span>
         )}
       </Fact>
-      <Fact name="Rock">
-        {sheet.site.rockType ?? <span className="text-muted">not recorded</span>}
-        {sheet.site.ucsMpa === null
-          ? ""
-          : `, ${formatQuantity(sheet.site.ucsMpa, "MPa")} (${sheet.site.ucsBasis ?? "basis not recorded"})`}
-      </Fact>
-      {sheet.rigging?.note ? <Fact name="Rigging">{sheet.rigging.note}</Fact> : null}
-    </Facts>
+    </>
   );
 }
 
-function signed(value: number): string {
-  return value < 0 ? `${MINUS}${Math.abs(value)}` : `+${value}`;
+function Rigging({ rigging }: { rigging: AnchorSheet["rigging"] }) {
+  if (rigging === null) return null;
+  const legs = rigging.legLengthsM.map((length, index) => (
+    <span key={index}>
+      {index > 0 ? ", " : ""}
+      <Quantity value={length} unit="m" />
+    </span>
+  ));
+  return (
+    <Fact name="Usual rigging">
+      {sentence(RIGGING_LABELS[rigging.kind])}
+      {legs.length > 0 ? <>; legs {legs}</> : null}
+      {rigging.backupSlackM === null ? null : (
+        <>
+          ; slack to the backup <Quantity value={rigging.backupSlackM} unit="m" />
+        </>
+      )}
+      {rigging.note ? <span className="block">{rigging.note}</span> : null}
+    </Fact>
+  );
 }

@@ -1,6 +1,7 @@
 import type { ReactNode } from "react";
 import { ReasonKey } from "@/components/finding/reason-key";
 import { Badge, type Tone } from "@/components/ui/badge";
+import { cx } from "@/components/ui/cx";
 import { LEVEL_LABELS, SOURCE_MARK_LABELS } from "@/lib/domain/labels";
 import type { Finding } from "@/lib/domain/finding/types";
 import type { Level } from "@/lib/domain/vocabulary";
@@ -25,7 +26,7 @@ export function ReasonItem({ number, reason, subject, idPrefix, children }: Reas
   return (
     <li
       id={idPrefix ? `${idPrefix}-reason-${number}` : `reason-${number}`}
-      className="keep-together grid scroll-mt-4 grid-cols-[auto_1fr] gap-x-3 border-t border-line py-4 target:bg-calm-ground"
+      className="keep-together grid scroll-mt-4 break-inside-avoid grid-cols-[auto_1fr] gap-x-3 border-t border-line py-4 target:bg-calm-ground"
     >
       <ReasonKey number={number} level={reason.level} />
       <div className="grid min-w-0 gap-2">
@@ -62,9 +63,17 @@ function Line({ name, children }: { name: string; children: ReactNode }) {
 }
 
 /** All reasons, worst first, numbered as on the drawing. */
-export function ReasonList({ children, label = "Reasons" }: { children: ReactNode; label?: string }) {
+export function ReasonList({
+  children,
+  label = "Reasons",
+  className,
+}: {
+  children: ReactNode;
+  label?: string;
+  className?: string;
+}) {
   return (
-    <ol aria-label={label} className="border-b border-line">
+    <ol aria-label={label} className={cx("border-b border-line", className)}>
       {children}
     </ol>
   );

@@ -21,7 +21,7 @@ export function Reasons({ findings, uses, withSubjects = true }: ReasonsProps) {
     return <p className="text-muted">No rule has anything to say about what is recorded here.</p>;
   }
   return (
-    <ReasonList>
+    <ReasonList className="gap-x-10 xl:columns-2 print:columns-2 print:gap-x-5">
       {reasonGroups(findings).map((group) => (
         <OneReason key={group[0].number} group={group} uses={uses} withSubjects={withSubjects} />
       ))}

@@ -1,5 +1,5 @@
 import type { ReactNode } from "react";
-import { Table, TableBody, TableHead, Td, Th } from "@/components/ui/table";
+import { StackCell, StackRow, StackTable } from "@/components/ui/stack-table";
 
 export interface Revision {
   id: string;
@@ -11,28 +11,26 @@ export interface Revision {
   by: string;
 }
 
+const HEAD = [{ name: "Rev." }, { name: "Change" }, { name: "Date" }, { name: "By" }];
+
 /** Who changed what and when: the audit trail in the form every drawing has. Newest first. */
 export function RevisionTable({ revisions }: { revisions: readonly Revision[] }) {
   return (
-    <Table caption="Revisions, newest first">
-      <TableHead>
-        <tr>
-          <Th className="w-12">Rev.</Th>
-          <Th>Change</Th>
-          <Th className="whitespace-nowrap">Date</Th>
-          <Th>By</Th>
-        </tr>
-      </TableHead>
-      <TableBody>
-        {revisions.map((revision) => (
-          <tr key={revision.id}>
-            <Td className="type-figure">{revision.letter}</Td>
-            <Td className="min-w-40">{revision.what}</Td>
-            <Td className="whitespace-nowrap">{revision.when}</Td>
-            <Td>{revision.by}</Td>
-          </tr>
-        ))}
-      </TableBody>
-    </Table>
+    <StackTable caption="Revisions, newest first" head={HEAD}>
+      {revisions.map((revision) => (
+        <StackRow key={revision.id}>
+          <StackCell head className="type-figure max-lg:text-lg">
+            {revision.letter}
+          </StackCell>
+          <StackCell wide className="max-lg:-mt-9 max-lg:pl-10 print:mt-0 print:pl-1.5">
+            {revision.what}
+          </StackCell>
+          <StackCell className="max-lg:pl-10 max-lg:text-sm max-lg:text-muted lg:whitespace-nowrap print:pl-1.5">
+            {revision.when}
+          </StackCell>
+          <StackCell className="max-lg:text-sm max-lg:text-muted">{revision.by}</StackCell>
+        </StackRow>
+      ))}
+    </StackTable>
   );
 }

@@ -1,9 +1,12 @@
 import type { Metadata } from "next";
+import { cache } from "react";
 import { followAnchor } from "@/app/(register)/anchors/[code]/actions";
 import { AnchorSheet } from "@/components/anchor/anchor-sheet";
+import { seldomActions } from "@/components/anchor/seldom-actions";
 import { SheetActions } from "@/components/anchor/sheet-actions";
 import { Notice } from "@/components/ui/notice";
 import { getActor } from "@/lib/auth/get-actor";
+import { now } from "@/lib/config/clock";
 import { orNotFound } from "@/lib/http/or-not-found";
 import { can } from "@/lib/policy/can";
 import { getAnchorSheet } from "@/lib/queries/get-anchor-sheet";
@@ -13,19 +16,22 @@ interface AnchorPageProps {
   searchParams: Promise<{ installed?: string }>;
 }
 
+const readSheet = cache(async (code: string) => orNotFound(getAnchorSheet(await getActor(), { code })));
+
 export async function generateMetadata({ params }: AnchorPageProps): Promise<Metadata> {
-  const sheet = await orNotFound(getAnchorSheet(await getActor(), await params));
+  const sheet = await readSheet((await params).code);
   return { title: `${sheet.code} ${sheet.label}` };
 }
 
 export default async function AnchorPage({ params, searchParams }: AnchorPageProps) {
   const actor = await getActor();
-  const sheet = await orNotFound(getAnchorSheet(actor, await params));
+  const sheet = await readSheet((await params).code);
   const { installed } = await searchParams;
   const subject = { areaId: sheet.area.id };
   return (
     <AnchorSheet
       sheet={sheet}
+      today={now().toISOString().slice(0, 10)}
       message={
         installed ? (
           <Notice tone="calm" role="status" title="Stored.">
@@ -37,15 +43,10 @@ export default async function AnchorPage({ params, searchParams }: AnchorPagePro
         <SheetActions
           code={sheet.code}
           anchorId={sheet.id}
-          signedIn={actor.kind === "person"}
-          watched={sheet.watched}
+          watched={actor.kind === "person" ? sheet.watched : null}
           follow={followAnchor}
-          rights={{
-            report: can(actor, "report.file", subject),
-            install: can(actor, "bolt.install", subject),
-            edit: can(actor, "anchor.edit", subject),
-            move: can(actor, "anchor.move", subject),
-          }}
+          mayInstall={can(actor, "bolt.install", subject)}
+          seldom={seldomActions(actor, sheet)}
         />
       }
     />
