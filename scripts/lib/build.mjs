@@ -1,6 +1,6 @@
 // Builds the application when its sources changed since the last build.
 import { createHash } from "node:crypto";
-import { copyFileSync, existsSync, mkdirSync, readFileSync, readdirSync, writeFileSync } from "node:fs";
+import { copyFileSync, existsSync, mkdirSync, readFileSync, readdirSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { root } from "./paths.mjs";
 import { showOrThrow } from "./run.mjs";
@@ -28,6 +28,8 @@ export async function ensureBuild(env) {
     return;
   }
   say("Building the application; this takes a minute or two.");
+  // A build that is broken off must not pass for the one before.
+  rmSync(stampFile, { force: true });
   await showOrThrow(process.execPath, [nextProgram, "build"], { cwd: root, env });
   writeFileSync(stampFile, stamp);
 }
