@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { formInput } from "@/lib/schemas/form-input";
 import {
   azimuthDeg,
   day,
@@ -186,3 +187,8 @@ export const createSpanInput = z
   })
   .meta({ id: "NewSpan" });
 export type CreateSpanInput = z.output<typeof createSpanInput>;
+
+/** The anchor a form changes, in the version its reader saw. */
+const anchorRef = { id, version: whole(1, 1_000_000_000) };
+export const changeAnchorForm = formInput(anchorChange.extend(anchorRef));
+export const moveAnchorForm = formInput(moveAnchorInput.extend(anchorRef));

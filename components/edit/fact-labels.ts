@@ -1,0 +1,21 @@
+/** Names of the facts of an anchor, for comparing two versions of them. */
+export const FACT_LABELS: Readonly<Record<string, string>> = {
+  label: "Name",
+  uses: "Used for",
+  pointErrorM: "Place known within, m",
+  designAzimuthDeg: "Load pulls to, °",
+  designElevationDeg: "Load above level, °",
+  faceAzimuthDeg: "Face looks to, °",
+  faceDipDeg: "Face dips, °",
+  elevationM: "Height above sea, m",
+  washing: "Washed by",
+  masterpointXMm: "Masterpoint right, mm",
+  masterpointYMm: "Masterpoint up, mm",
+  masterpointZMm: "Masterpoint out of the face, mm",
+  "rigging.kind": "How it is gathered",
+  "rigging.backupSlackM": "Slack of the backup, m",
+  "rigging.note": "Note on the rigging",
+  rowName: "Row of bolts",
+  rowLengthM: "Length of the row, m",
+  note: "Note",
+};
