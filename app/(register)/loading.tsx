@@ -1,11 +1,6 @@
-import { Spinner } from "@/components/ui/spinner";
+import { LoadingState } from "@/components/ui/state-panel";
 
+/** Not at the root of the app: a page behind a loading state needs a script to be read, and the map must not. */
 export default function Loading() {
-  return (
-    <div className="grid min-h-[50vh] place-items-center" role="status">
-      <span className="flex items-center gap-3 text-muted">
-        <Spinner /> Reading the register…
-      </span>
-    </div>
-  );
+  return <LoadingState title="Reading the register…" />;
 }
