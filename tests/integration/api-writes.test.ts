@@ -179,12 +179,13 @@ describe("a wrong body", () => {
     },
   );
 
-  it("that is not JSON, says nothing of JSON, or is too large is refused", async () => {
+  it("that is not JSON, says nothing of JSON, cannot be kept or is too large is refused", async () => {
     const before = await stateOfRegister();
     expect(await send(postReport, "{not json")).toMatchObject({ status: 400 });
     expect(await send(postReport, "{}", { headers: { "content-type": "text/plain" } })).toMatchObject({
       status: 415,
     });
+    expect(await send(postReport, reportOf(r, { note: "a\u0000b" }))).toMatchObject({ status: 422 });
     expect(await send(postReport, JSON.stringify({ note: "x".repeat(1_100_000) }))).toMatchObject({
       status: 413,
     });
