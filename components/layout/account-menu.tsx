@@ -8,6 +8,7 @@ const STEWARD_ENTRIES: readonly MenuEntry[] = [
   { href: "/people", label: "People" },
   { href: "/batch-warnings", label: "Batch warnings" },
   { href: "/closures", label: "Closures" },
+  { href: "/failed-mail", label: "Failed mail" },
 ];
 
 /** The reader's own corner: sign in, or name, settings and sign-out. */

@@ -172,6 +172,7 @@ export function closureViewOf({ closure, siteName, anchorCode, areaName }: Closu
   return {
     id: closure.id,
     version: closure.version,
+    areaId: closure.areaId,
     scope,
     scopeName: anchorCode ?? siteName ?? areaName,
     reason: closure.reason,

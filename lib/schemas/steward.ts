@@ -1,5 +1,6 @@
 import { z } from "zod";
-import { day, id, lonLat, metal, note, number, oneOf, text, yesNo } from "@/lib/schemas/fields";
+import { day, id, lonLat, metal, note, number, oneOf, text, whole, yesNo } from "@/lib/schemas/fields";
+import { formInput } from "@/lib/schemas/form-input";
 import { AREA_VISIBILITIES, COASTS, SITE_VISIBILITIES, SO2_BANDS, WASHINGS } from "@/lib/domain/vocabulary";
 
 export const batchWarningInput = z
@@ -36,6 +37,9 @@ export const batchWarningInput = z
 export type BatchWarningInput = z.output<typeof batchWarningInput>;
 
 export const closeWarningInput = z.strictObject({ id, reason: text(500, 3) });
+/** The record a form ends, in the version its reader saw. */
+const version = whole(1, 1_000_000_000);
+export const closeWarningForm = formInput(closeWarningInput.extend({ version }));
 export type CloseWarningInput = z.output<typeof closeWarningInput>;
 
 export const closureInput = z
@@ -62,6 +66,7 @@ export const closureInput = z
 export type ClosureInput = z.output<typeof closureInput>;
 
 export const liftClosureInput = z.strictObject({ id, reason: text(500, 3) });
+export const liftClosureForm = formInput(liftClosureInput.extend({ version }));
 export type LiftClosureInput = z.output<typeof liftClosureInput>;
 
 /** Exactly one of anchor and site. */

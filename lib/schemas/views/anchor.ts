@@ -136,6 +136,7 @@ export const closureView = z
   .object({
     id: z.string(),
     version: z.number(),
+    areaId: z.string(),
     scope: z.enum(["area", "site", "anchor"]),
     scopeName: z.string(),
     reason: z.string(),
