@@ -8,7 +8,6 @@ import { SiteHeader } from "@/components/layout/site-header";
 import { SkipLink } from "@/components/layout/skip-link";
 import { parseTheme, THEME_COOKIE } from "@/components/layout/theme";
 import { navEntries, type Viewer } from "@/components/layout/viewer";
-import { ToastRegion } from "@/components/ui/toast-region";
 import { getActor } from "@/lib/auth/get-actor";
 import { usesMailSink } from "@/lib/config/env";
 import type { Actor } from "@/lib/shared/actor";
@@ -37,14 +36,12 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
     <html lang="en" data-theme={theme === "system" ? undefined : theme} className={fontVariables}>
       <body className="flex flex-col">
         <SkipLink />
-        <ToastRegion>
-          <SiteHeader viewer={viewer} entries={entries} theme={theme} />
-          <main id="content" tabIndex={-1} className="flex-1">
-            {children}
-          </main>
-          <SiteFooter />
-          <PhoneBar entries={entries} />
-        </ToastRegion>
+        <SiteHeader viewer={viewer} entries={entries} theme={theme} />
+        <main id="content" tabIndex={-1} className="flex-1">
+          {children}
+        </main>
+        <SiteFooter />
+        <PhoneBar entries={entries} />
       </body>
     </html>
   );

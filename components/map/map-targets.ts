@@ -28,7 +28,8 @@ export function nearestTarget(
     { layers },
   );
   const distance = (feature: MapGeoJSONFeature) => {
-    if (feature.geometry.type !== "Point") return Number.POSITIVE_INFINITY;
+    // Behind every mark; a finite number, because two infinities cannot be compared by their difference.
+    if (feature.geometry.type !== "Point") return Number.MAX_SAFE_INTEGER;
     const [lon = 0, lat = 0] = feature.geometry.coordinates;
     const at = map.project([lon, lat]);
     return Math.hypot(at.x - x, at.y - y);

@@ -58,22 +58,6 @@ export function ForbiddenState(props: StateProps) {
   );
 }
 
-/** No connection; what is kept on the device can still be read. */
-export function OfflineState(props: StateProps) {
-  return (
-    <StatePanel
-      {...props}
-      drawing={
-        <>
-          <path d="M28 33a11 11 0 0 1 16 0M21 25a21 21 0 0 1 30 0" strokeDasharray="3.5 3" />
-          <path d="M36 41v.01" strokeWidth="5" strokeLinecap="round" />
-          <path d="M20 45 52 9" />
-        </>
-      }
-    />
-  );
-}
-
 /** Long work is going on; say what, and how far, in the children. */
 export function LoadingState({ title, children, className }: StateProps) {
   return (

@@ -88,36 +88,6 @@ export const VERDICT_LABELS: Readonly<Record<Verdict, string>> = {
   nothing_against: "Nothing found against it",
 };
 
-/** What each rule looks at; a reason's own title says what it found. */
-export const RULE_LABELS: Readonly<Record<RuleCode, string>> = {
-  "load.bend": "bending under load",
-  "load.strength": "breaking strength",
-  "load.one-lost": "one placement lost",
-  "load.direction": "direction of pull",
-  "load.unknown": "strength not recorded",
-  "metal.class": "corrosion class of the place",
-  "metal.stress-corrosion": "stress corrosion",
-  "metal.plated": "plated steel outdoors",
-  "metal.mixed": "mixed metals",
-  "metal.unknown": "metal not recorded",
-  "rock.embedment": "depth in the rock",
-  "rock.spacing": "distance between bolts",
-  "rock.edge": "distance to an edge",
-  "rock.method": "method for this rock",
-  "rock.hold": "hold in the rock",
-  "rock.one-body": "one block carries all",
-  "eye.radius": "radius of the eye",
-  "fitting.wear": "wear of a fitting",
-  "record.missing": "missing record",
-  "record.curing": "glue curing",
-  "record.glue-expired": "glue past its date",
-  "record.warning": "batch warning",
-  "record.standard": "standard",
-  "care.overdue": "check overdue",
-  "care.report-open": "open report",
-  "care.closure": "closure",
-};
-
 export const SOURCE_MARK_LABELS: Readonly<Record<SourceMark, string>> = {
   published: "published",
   restated: "restated by others",
@@ -133,12 +103,6 @@ export const WASHING_LABELS: Readonly<Record<Washing, string>> = {
 };
 
 export const SO2_LABELS: Readonly<Record<So2Band, string>> = { low: "low", medium: "medium", high: "high" };
-
-export const COAST_LABELS: Readonly<Record<Coast, string>> = {
-  other: "open coast",
-  baltic_or_german_north_sea: "Baltic or German North Sea coast",
-  strict: "coast taken strictly",
-};
 
 export const PLACEMENT_KIND_LABELS: Readonly<Record<PlacementKind, string>> = {
   bolt: "bolt",
@@ -254,12 +218,6 @@ export const SITE_VISIBILITY_LABELS: Readonly<Record<SiteVisibility, string>> = 
 export const TYPE_STATUS_LABELS: Readonly<Record<TypeStatus, string>> = {
   current: "current",
   discontinued: "discontinued",
-};
-
-export const ROLE_LABELS: Readonly<Record<Role, string>> = {
-  rigger: "rigger",
-  bolter: "bolter",
-  steward: "steward",
 };
 
 /** A metal as it is stored, in words: `1.4404` stays as it is, `ti-2` becomes "titanium grade 2". */

@@ -86,7 +86,7 @@ export async function readUpload(
 /** The version the sender last saw. @throws MalformedRequest 428 without `If-Match`. */
 export function versionWanted(request: Request): number {
   const header = request.headers.get("if-match");
-  const version = /^(?:W\/)?"(\d+)"$/.exec(header ?? "")?.[1];
+  const version = /^(?:W\/)?"(\d+)(?:\.[\w-]+)?"$/.exec(header ?? "")?.[1];
   if (!version) {
     throw new MalformedRequest(
       428,

@@ -1,5 +1,5 @@
 import "server-only";
-import { randomUUID } from "node:crypto";
+import { createHash, randomUUID } from "node:crypto";
 import { z } from "zod";
 import { addressOf } from "@/lib/auth/address";
 import { actorFromRequest } from "@/lib/auth/get-actor";
@@ -105,13 +105,23 @@ function parsePath(schema: z.ZodType | undefined, params: Record<string, string 
 
 function jsonResponse({ status = 200, body, headers = {} }: RouteAnswer, request: Request): Response {
   const sent = new Headers({ "cache-control": "private, no-cache", ...headers });
-  const etag = sent.get("etag");
-  if (etag && request.method === "GET" && request.headers.get("if-none-match") === etag) {
-    return new Response(null, { status: 304, headers: sent });
-  }
   if (body === null) return new Response(null, { status: 204, headers: sent });
+  const text = JSON.stringify(body);
+  const tag = sent.get("etag");
+  if (tag !== null && request.method === "GET") {
+    const etag = contentTag(tag, text);
+    sent.set("etag", etag);
+    if (request.headers.get("if-none-match") === etag)
+      return new Response(null, { status: 304, headers: sent });
+  }
   if (!sent.has("content-type")) sent.set("content-type", "application/json");
-  return new Response(JSON.stringify(body), { status, headers: sent });
+  return new Response(text, { status, headers: sent });
+}
+
+/** Verdicts and conditions change without a new version of the record: the tag names both. */
+function contentTag(versionTag: string, text: string): string {
+  const digest = createHash("sha256").update(text).digest("base64url").slice(0, 12);
+  return versionTag.replace(/"$/, `.${digest}"`);
 }
 
 function refusal(error: unknown, requestId: string): Response {

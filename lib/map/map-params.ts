@@ -1,4 +1,4 @@
-import { createLoader, createParser, parseAsString, parseAsStringLiteral } from "nuqs/server";
+import { createParser, parseAsString, parseAsStringLiteral } from "nuqs/server";
 import { USES } from "@/lib/domain/vocabulary";
 import { FIXINGS, METAL_KINDS, SEA_LIMITS, STATES } from "@/lib/map/filter";
 
@@ -39,5 +39,3 @@ export const mapParams = {
   anchor: parseAsString,
   at: parseAsCamera,
 };
-
-export const loadMapParams = createLoader(mapParams);

@@ -56,4 +56,3 @@ export const whatIfInput = z
     onDate: day.nullish(),
   })
   .meta({ id: "WhatIf" });
-export type WhatIfBody = z.output<typeof whatIfInput>;

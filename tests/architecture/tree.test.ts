@@ -36,7 +36,10 @@ describe("the tree", () => {
   it("names code files in kebab-case", () => {
     const code = files().filter((file) => CODE.test(file) && !file.startsWith("."));
     const name = (file: string) =>
-      (file.split("/").at(-1) ?? file).replace(/\.(test|spec|config|setup)(?=\.)/, "");
+      (file.split("/").at(-1) ?? file).replace(
+        /\.(every\.spec|phone\.spec|test|spec|config|setup)(?=\.)/,
+        "",
+      );
     expect(code.filter((file) => !/^[a-z0-9]+(-[a-z0-9]+)*\.[a-z]+$/.test(name(file)))).toEqual([]);
   });
 });

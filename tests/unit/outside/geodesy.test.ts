@@ -1,4 +1,4 @@
-import distance from "@turf/distance";
+import { distance } from "@turf/turf";
 import geodesic from "geographiclib-geodesic";
 import { describe, expect, it } from "vitest";
 
@@ -17,7 +17,9 @@ describe("distances on the ellipsoid", () => {
 
   it("a great circle differs from that line by the published amount, so spans never use it", () => {
     // A sphere of 6,371,008.8 m gives 54,925.51 m on the same line (arithmetic on the haversine formula).
-    const metres = distance([FLINDERS.lon, FLINDERS.lat], [BUNINYONG.lon, BUNINYONG.lat], { units: "meters" });
+    const metres = distance([FLINDERS.lon, FLINDERS.lat], [BUNINYONG.lon, BUNINYONG.lat], {
+      units: "meters",
+    });
     expect(metres).toBeCloseTo(54_925.51, 1);
   });
 });
