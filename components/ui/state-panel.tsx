@@ -1,6 +1,5 @@
 import type { ReactNode } from "react";
 import { cx } from "@/components/ui/cx";
-import { Spinner } from "@/components/ui/spinner";
 
 interface StateProps {
   title: ReactNode;
@@ -55,17 +54,6 @@ export function ForbiddenState(props: StateProps) {
         </>
       }
     />
-  );
-}
-
-/** Long work is going on; say what, and how far, in the children. */
-export function LoadingState({ title, children, className }: StateProps) {
-  return (
-    <div role="status" className={cx("grid justify-items-center gap-2 px-4 py-10 text-center", className)}>
-      <Spinner className="size-8 text-action" />
-      <p className="font-semibold">{title}</p>
-      {children ? <div className="max-w-prose text-muted">{children}</div> : null}
-    </div>
   );
 }
 

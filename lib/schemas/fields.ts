@@ -47,7 +47,18 @@ export const instant = z.iso
   .datetime({ offset: true, error: "A time like 2026-05-04T10:30:00Z is wanted here." })
   .transform((value) => new Date(value));
 
-export const lonLat = z.strictObject({ lon: number(-180, 180), lat: number(-90, 90) }).meta({ id: "LonLat" });
+const geoJsonPoint = z.object({ type: z.literal("Point"), coordinates: z.tuple([z.unknown(), z.unknown()]) });
+
+/** A point on WGS84: by name, or GeoJSON (longitude first) as the API answers it. */
+export const lonLat = z
+  .preprocess(
+    (value) => {
+      const point = geoJsonPoint.safeParse(value);
+      return point.success ? { lon: point.data.coordinates[0], lat: point.data.coordinates[1] } : value;
+    },
+    z.strictObject({ lon: number(-180, 180), lat: number(-90, 90) }),
+  )
+  .meta({ id: "LonLat", description: "lon and lat, or a GeoJSON Point" });
 
 /** EN number, titanium grade or plating; hyphens stay. */
 export const metal = z

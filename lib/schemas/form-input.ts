@@ -15,7 +15,9 @@ function fitted(schema: unknown, value: unknown): unknown {
     return value === "" && !takesNull(inner) ? undefined : fitted(inner, value);
   }
   if (schema instanceof z.ZodNullable) return value === "" ? null : fitted(schema.unwrap(), value);
-  if (schema instanceof z.ZodPipe) return fitted(schema.in, value);
+  if (schema instanceof z.ZodPipe) {
+    return fitted(schema.in instanceof z.ZodTransform ? schema.out : schema.in, value);
+  }
   if (schema instanceof z.ZodNumber) return typeof value === "string" ? numberOf(value) : value;
   if (schema instanceof z.ZodBoolean) return booleanOf(value);
   if (schema instanceof z.ZodArray) return listOf(value).map((entry) => fitted(schema.element, entry));
