@@ -34,13 +34,14 @@ function QueueRow({ entry, place, now }: { entry: QueueEntry; place: number; now
   const { anchorCode, anchorLabel, siteName, title } = entry;
   return (
     <StackRow>
-      <StackCell label="Rank" className="lg:w-20">
+      <StackCell className="max-lg:hidden lg:w-20 print:table-cell">
         <span className="type-figure text-2xl leading-none">{place}</span>
         {entry.movedPoints === null ? null : (
           <span className="block text-sm text-muted">computed {entry.computedRank}</span>
         )}
       </StackCell>
       <StackCell head wide className="order-first lg:w-72">
+        <span className="type-figure text-lg lg:hidden print:hidden">{place} </span>
         <Link href={`/queue/${entry.id}`} className="inline-block py-1 font-semibold text-link">
           {title}
         </Link>

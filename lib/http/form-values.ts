@@ -29,7 +29,8 @@ function setAt(target: Values, path: string[], value: FormDataEntryValue | FormD
   const next: Values =
     typeof inner === "object" && !Array.isArray(inner) && !(inner instanceof File)
       ? inner
-      : Object.create(null);
+      : // A plain object: it travels back to the form when its values are refused.
+        {};
   target[head] = next;
   setAt(next, rest, value);
 }
