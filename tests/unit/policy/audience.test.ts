@@ -2,7 +2,14 @@ import { describe, expect, it } from "vitest";
 import { audience, isMember, PUBLIC_AUDIENCE, roundedPoint } from "@/lib/policy/audience";
 import type { Person } from "@/lib/shared/actor";
 
-const base: Person = { kind: "person", userId: "u", name: "U", email: "u@x.example", isAdmin: false, roles: {} };
+const base: Person = {
+  kind: "person",
+  userId: "u",
+  name: "U",
+  email: "u@x.example",
+  isAdmin: false,
+  roles: {},
+};
 
 describe("audience", () => {
   it("shows a signed-in person without membership no more than a visitor", () => {
