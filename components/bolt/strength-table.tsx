@@ -1,5 +1,6 @@
 import { Quantity } from "@/components/ui/quantity";
 import { SourceMark, type NumberSource } from "@/components/ui/source-mark";
+import { readableText } from "@/lib/shared/readable-text";
 import { Table, TableBody, TableHead, Td, Th } from "@/components/ui/table";
 
 interface StrengthTableProps {
@@ -67,7 +68,7 @@ export function StrengthTable({ strengths, sourceNote }: StrengthTableProps) {
       {basis === "estimate" ? (
         <p className="text-sm text-muted">An estimate is computed from the section; it is never a rating.</p>
       ) : null}
-      {sourceNote ? <p className="text-sm text-muted">{sourceNote}</p> : null}
+      {sourceNote ? <p className="text-sm text-muted">{readableText(sourceNote)}</p> : null}
     </div>
   );
 }

@@ -1,58 +1,38 @@
 import Link from "next/link";
+import { StrengthStrip, StripLegend } from "@/components/catalogue/strength-strip";
 import { Quantity } from "@/components/ui/quantity";
 import { SourceMark } from "@/components/ui/source-mark";
-import { Table, TableBody, TableHead, Td, Th } from "@/components/ui/table";
+import { StackCell, StackRow, StackTable } from "@/components/ui/stack-table";
 import { FORM_LABELS, metalLabel, sentence } from "@/lib/domain/labels";
 import { FORMS } from "@/lib/domain/vocabulary";
 import type { BoltTypeView } from "@/lib/schemas/views/register";
 
-/** The catalogue by form: what it breaks at, and apart from that what it bends at. */
+const HEAD = [
+  { name: "Type", className: "w-[26%]" },
+  { name: "Metal", className: "w-[13%]" },
+  { name: "Bends, breaks", className: "w-[22%]" },
+  { name: "Bends from", numeric: true },
+  { name: "Rated across", numeric: true, className: "w-[9%]" },
+  { name: "Rated along", numeric: true, className: "w-[9%]" },
+  { name: "In the rock", numeric: true, className: "w-[6%]" },
+];
+
+/** The catalogue by form: what it bends at, and apart from that what it breaks at. */
 export function TypeList({ types }: { types: readonly BoltTypeView[] }) {
   return (
-    <div className="grid gap-8">
+    <div className="grid gap-10">
+      <StripLegend />
       {FORMS.map((form) => {
         const own = types.filter((type) => type.form === form);
         if (own.length === 0) return null;
         return (
-          <section key={form} className="grid gap-2">
-            <h2>{sentence(FORM_LABELS[form])}</h2>
-            <Table caption={`Types: ${FORM_LABELS[form]}`}>
-              <TableHead>
-                <tr>
-                  <Th>Type</Th>
-                  <Th>Metal</Th>
-                  <Th className="text-right">Rated across</Th>
-                  <Th className="text-right">Rated along</Th>
-                  <Th className="text-right">Bends from</Th>
-                  <Th className="text-right">In the rock</Th>
-                </tr>
-              </TableHead>
-              <TableBody>
-                {own.map((type) => (
-                  <tr key={type.id}>
-                    <Th scope="row" className="min-w-52">
-                      <Link href={`/types/${type.id}`} className="underline underline-offset-2">
-                        {type.name}
-                      </Link>
-                      {type.status === "discontinued" ? (
-                        <span className="block text-sm font-normal text-muted">discontinued</span>
-                      ) : null}
-                    </Th>
-                    <Td>{metalLabel(type.boltMetal)}</Td>
-                    <Td numeric>
-                      <Quantity value={type.ratedRadialKn} unit="kN" />
-                    </Td>
-                    <Td numeric>
-                      <Quantity value={type.ratedAxialKn} unit="kN" />
-                    </Td>
-                    <Td numeric>
-                      <OnsetRange type={type} />
-                    </Td>
-                    <Td numeric>{type.inForce}</Td>
-                  </tr>
-                ))}
-              </TableBody>
-            </Table>
+          <section key={form} aria-labelledby={form} className="grid gap-3">
+            <h2 id={form}>{sentence(FORM_LABELS[form])}</h2>
+            <StackTable caption={`Types: ${FORM_LABELS[form]}`} head={HEAD} className="lg:table-fixed">
+              {own.map((type) => (
+                <TypeRow key={type.id} type={type} />
+              ))}
+            </StackTable>
           </section>
         );
       })}
@@ -60,21 +40,55 @@ export function TypeList({ types }: { types: readonly BoltTypeView[] }) {
   );
 }
 
+function TypeRow({ type }: { type: BoltTypeView }) {
+  return (
+    <StackRow>
+      <StackCell head>
+        <Link href={`/types/${type.id}`} className="inline-block py-1 font-semibold text-link">
+          {type.name}
+        </Link>
+        {type.status === "discontinued" ? (
+          <span className="block text-sm text-muted">discontinued</span>
+        ) : null}
+      </StackCell>
+      <StackCell label="Metal">{metalLabel(type.boltMetal)}</StackCell>
+      <StackCell wide className="lg:align-middle print:align-middle">
+        <StrengthStrip type={type} />
+      </StackCell>
+      <StackCell label="Bends from" numeric>
+        <OnsetRange type={type} />
+      </StackCell>
+      <StackCell label="Rated across" numeric>
+        <Quantity value={type.ratedRadialKn} unit="kN" digits={1} />
+      </StackCell>
+      <StackCell label="Rated along" numeric>
+        <Quantity value={type.ratedAxialKn} unit="kN" digits={1} />
+      </StackCell>
+      <StackCell label="In the rock" numeric className="type-figure">
+        {type.inForce}
+      </StackCell>
+    </StackRow>
+  );
+}
+
 /** One number or a range, with where it comes from. */
-export function OnsetRange({ type }: { type: BoltTypeView }) {
+export function OnsetRange({
+  type,
+}: {
+  type: Pick<BoltTypeView, "bendOnsetLowKn" | "bendOnsetHighKn" | "bendOnsetBasis">;
+}) {
   const { bendOnsetLowKn: low, bendOnsetHighKn: high, bendOnsetBasis } = type;
+  if (low === null && high === null) return <SourceMark source={bendOnsetBasis} />;
   return (
     <>
-      <Quantity value={low} unit="kN" />
+      <Quantity value={low} unit="kN" digits={1} />
       {high !== null && high !== low ? (
         <>
           {" "}
-          to <Quantity value={high} unit="kN" />
+          to <Quantity value={high} unit="kN" digits={1} />
         </>
-      ) : null}
-      <span className="block">
-        <SourceMark source={bendOnsetBasis} />
-      </span>
+      ) : null}{" "}
+      <SourceMark source={bendOnsetBasis} />
     </>
   );
 }

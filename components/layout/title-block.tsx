@@ -10,8 +10,8 @@ export interface TitleBlockProps {
   condition?: ReactNode;
   /** Further cells, in order: site, use, last check… */
   cells: readonly { name: string; value: ReactNode }[];
-  /** A, B, C…: goes on with every recorded change. */
-  revision: string;
+  /** A, B, C…: goes on with every recorded change. Left out where changes are not told on the sheet. */
+  revision?: string;
   /** "1/1". */
   sheet?: string;
 }
@@ -35,9 +35,11 @@ export function TitleBlock(props: TitleBlockProps) {
             {cell.value}
           </Cell>
         ))}
-        <Cell name="Revision">
-          <span className="type-figure text-lg leading-none">{revision}</span>
-        </Cell>
+        {revision === undefined ? null : (
+          <Cell name="Revision">
+            <span className="type-figure text-lg leading-none">{revision}</span>
+          </Cell>
+        )}
         <Cell name="Sheet">
           <span className="type-figure">{sheet}</span>
         </Cell>

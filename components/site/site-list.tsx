@@ -3,6 +3,7 @@ import { MarkShape } from "@/components/finding/condition-mark";
 import { CONDITION_LABELS, SITE_VISIBILITY_LABELS } from "@/lib/domain/labels";
 import { CONDITIONS } from "@/lib/domain/vocabulary";
 import type { SiteSummary } from "@/lib/schemas/views/register";
+import { readableText } from "@/lib/shared/readable-text";
 
 /** Sites as rows of a schedule: name, rock, and how many anchors stand in which condition. */
 export function SiteList({ sites }: { sites: readonly SiteSummary[] }) {
@@ -15,17 +16,19 @@ export function SiteList({ sites }: { sites: readonly SiteSummary[] }) {
         >
           <div>
             <h2>
-              <Link href={`/sites/${site.slug}`} className="hover:text-action hover:underline">
+              <Link href={`/sites/${site.slug}`} className="inline-block py-1 text-link">
                 {site.name}
               </Link>
             </h2>
             <p className="max-w-prose text-muted">
               {site.exact
-                ? site.summary
+                ? readableText(site.summary)
                 : "The group keeps this place to its members; the point is rounded to about 1 km."}
             </p>
             <p className="type-label text-muted">
-              {site.areaName}
+              <Link href={`/areas/${site.areaSlug}`} className="inline-block py-1 text-link">
+                {site.areaName}
+              </Link>
               {site.rockType ? ` · ${site.rockType}` : ""}
               {site.visibility === "public" ? "" : ` · ${SITE_VISIBILITY_LABELS[site.visibility]}`}
               {site.openReports > 0

@@ -5,7 +5,7 @@ interface StackTableProps {
   /** Says what the table is; read out, not shown. */
   caption: string;
   /** Names of the columns, in order; `numeric` ones are set flush right. */
-  head: readonly { name: string; numeric?: boolean }[];
+  head: readonly { name: string; numeric?: boolean; className?: string }[];
   children: ReactNode;
   className?: string;
 }
@@ -29,12 +29,12 @@ export function StackTable({ caption, head, children, className }: StackTablePro
         className="sr-only border-b border-frame lg:not-sr-only lg:table-header-group print:not-sr-only print:table-header-group"
       >
         <tr role="row">
-          {head.map(({ name, numeric }) => (
+          {head.map(({ name, numeric, className: own }) => (
             <th
               key={name}
               role="columnheader"
               scope="col"
-              className={cx("px-2 py-2 align-bottom type-label text-muted", numeric && "text-right")}
+              className={cx("px-2 py-2 align-bottom type-label text-muted", numeric && "text-right", own)}
             >
               {name}
             </th>

@@ -13,6 +13,7 @@ import { getActor } from "@/lib/auth/get-actor";
 import { orNotFound } from "@/lib/http/or-not-found";
 import { can } from "@/lib/policy/can";
 import { getSite } from "@/lib/queries/get-site";
+import { readableText } from "@/lib/shared/readable-text";
 
 interface SitePageProps {
   params: Promise<{ slug: string }>;
@@ -28,7 +29,7 @@ export default async function SitePage({ params }: SitePageProps) {
   return (
     <Page
       title={site.name}
-      intro={site.summary}
+      intro={readableText(site.summary)}
       actions={
         <>
           <LinkButton href={`/?site=${site.slug}`}>On the map</LinkButton>
@@ -42,14 +43,15 @@ export default async function SitePage({ params }: SitePageProps) {
     >
       <div className="grid gap-8">
         {site.exact ? null : (
-          <Notice tone="info" title="The place is kept to members">
-            You see its name and a point rounded to about 1 km.
+          <Notice tone="info" title="Members see the place">
+            The group keeps this site to itself. You see its name, its hardware and a point rounded to about 1
+            km; what it could be found by is left out.
           </Notice>
         )}
         {site.closures.length > 0 ? (
-          <SheetSection title="Closures">
+          <Notice tone="warn" title="Closures">
             <ClosureList closures={site.closures} />
-          </SheetSection>
+          </Notice>
         ) : null}
         <SheetSection
           title="Anchors"
@@ -69,7 +71,7 @@ export default async function SitePage({ params }: SitePageProps) {
           ) : null}
         </div>
         <p>
-          <Link href={`/areas/${site.areaSlug}`} className="underline underline-offset-2">
+          <Link href={`/areas/${site.areaSlug}`} className="inline-block py-2 text-link">
             {site.areaName}: who looks after it, and the loads it counts with
           </Link>
         </p>

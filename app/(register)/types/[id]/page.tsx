@@ -26,7 +26,6 @@ export default async function TypePage({ params }: TypePageProps) {
       title={{
         name: type.name,
         kind: "Bolt type",
-        revision: "–",
         cells: [
           { name: "Form", value: sentence(FORM_LABELS[type.form]) },
           { name: "Metal", value: metalLabel(type.boltMetal) },
