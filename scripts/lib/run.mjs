@@ -45,7 +45,10 @@ export function show(command, args, options = {}) {
       console.error(`${command} could not be run: ${error.message}`);
       resolve(1);
     });
-    child.once("exit", (code, signal) => resolve(code ?? (signal ? 1 : 0)));
+    child.once("exit", (code, signal) => {
+      if (signal) console.error(`${command} was ended by ${signal}.`);
+      resolve(code ?? 1);
+    });
   });
 }
 
