@@ -52,6 +52,21 @@ export function show(command, args, options = {}) {
   });
 }
 
+/** Runs a command and keeps what it prints. Resolves to the exit code and the output; never rejects. */
+export function collect(command, args, options = {}) {
+  return new Promise((resolve) => {
+    const child = track(spawn(command, args, { stdio: ["ignore", "pipe", "pipe"], ...options }));
+    let output = "";
+    for (const stream of [child.stdout, child.stderr]) {
+      stream.setEncoding("utf8").on("data", (chunk) => (output += chunk));
+    }
+    child.once("error", (error) =>
+      resolve({ code: 1, output: `${command} could not be run: ${error.message}` }),
+    );
+    child.once("close", (code) => resolve({ code: code ?? 1, output }));
+  });
+}
+
 /** Like `show`, but throws when the command fails. */
 export async function showOrThrow(command, args, options = {}) {
   const code = await show(command, args, options);
