@@ -51,7 +51,7 @@ const mayImport = {
 export default defineConfig([
   ...nextVitals,
   ...nextTs,
-  globalIgnores([".next/**", ".local/**", "next-env.d.ts", "db/migrations/**", "public/**"]),
+  globalIgnores([".next/**", ".next-*/**", ".local/**", "next-env.d.ts", "db/migrations/**", "public/**"]),
   {
     files: ["app/**", "components/**", "lib/**", "db/**"],
     plugins: { boundaries },
