@@ -20,11 +20,11 @@ export function HardwareFacts({ bolt }: { bolt: BoltView }) {
       {bolt.linkMetal ? <Fact name="Metal of the link">{metalLabel(bolt.linkMetal)}</Fact> : null}
       {bolt.rodDiameterMm === null ? null : (
         <Fact name="Rod">
-          {bolt.rodCount === null ? null : `${bolt.rodCount} × `}
+          {bolt.rodCount !== null && bolt.rodCount > 1 ? `${bolt.rodCount} × ` : null}
           <Quantity value={bolt.rodDiameterMm} unit="mm" />
         </Fact>
       )}
-      {bolt.shankDiameterMm === null ? null : (
+      {bolt.shankDiameterMm === null || bolt.shankDiameterMm === bolt.rodDiameterMm ? null : (
         <Fact name="Shank">
           <Quantity value={bolt.shankDiameterMm} unit="mm" />
         </Fact>

@@ -24,7 +24,7 @@ export function StrengthTable({ strengths, sourceNote }: StrengthTableProps) {
       <Table caption="Rated strength and bend onset">
         <TableHead>
           <tr>
-            <Th />
+            <Th>Load</Th>
             <Th className="text-right">Across</Th>
             <Th className="text-right">Along its axis</Th>
             <Th>Source</Th>

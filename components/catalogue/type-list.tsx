@@ -44,7 +44,7 @@ function TypeRow({ type }: { type: BoltTypeView }) {
   return (
     <StackRow>
       <StackCell head>
-        <Link href={`/types/${type.id}`} className="inline-block py-1 font-semibold text-link">
+        <Link href={`/types/${type.id}`} className="inline-block font-semibold text-link max-lg:py-1">
           {type.name}
         </Link>
         {type.status === "discontinued" ? (

@@ -4,7 +4,7 @@ import { useRouter } from "next/navigation";
 import type { Kept } from "@/components/edit/edit-types";
 import { FactSections } from "@/components/edit/fact-fields";
 import { FACT_LABELS } from "@/components/edit/fact-labels";
-import { StaleNotice, versionToSend } from "@/components/edit/stale-notice";
+import { isStale, StaleNotice, versionToSend } from "@/components/edit/stale-notice";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import { Notice } from "@/components/ui/notice";
 import { NumberField } from "@/components/ui/number-field";
@@ -40,7 +40,7 @@ function Fields({
     draft.forget();
     router.push(`/anchors/${anchor.code}`);
   });
-  const stale = form.state.state === "refused" && form.state.code === "stale_version";
+  const stale = isStale(form.state);
   return (
     <form
       {...form.formProps}

@@ -2,7 +2,7 @@
 
 import { useRouter } from "next/navigation";
 import type { Kept } from "@/components/edit/edit-types";
-import { StaleNotice, versionToSend } from "@/components/edit/stale-notice";
+import { isStale, StaleNotice, versionToSend } from "@/components/edit/stale-notice";
 import { PointFields } from "@/components/place/point-fields";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import { SubmitButton } from "@/components/ui/submit-button";
@@ -24,7 +24,7 @@ const LABELS = { "point.lat": "Latitude", "point.lon": "Longitude", pointErrorM:
 export function MoveAnchorForm({ action, anchor, stored, marks }: MoveAnchorFormProps) {
   const router = useRouter();
   const form = useForm(action, () => router.push(`/anchors/${anchor.code}`));
-  const stale = form.state.state === "refused" && form.state.code === "stale_version";
+  const stale = isStale(form.state);
   return (
     <form {...form.formProps} className="grid gap-7">
       {stale ? null : <ErrorSummary problems={form.problems} />}

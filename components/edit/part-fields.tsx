@@ -65,10 +65,16 @@ export function Rows({ rows, name, list, children }: RowsProps) {
         </section>
       ))}
       <Button onClick={rows.add} className="justify-self-start">
-        {rows.ids.length === 0 ? `Add a ${name.toLowerCase()}` : `Add another ${name.toLowerCase()}`}
+        {rows.ids.length === 0
+          ? `Add ${article(name)} ${name.toLowerCase()}`
+          : `Add another ${name.toLowerCase()}`}
       </Button>
     </div>
   );
+}
+
+function article(name: string): string {
+  return /^[aeiou]/i.test(name) ? "an" : "a";
 }
 
 interface PlacementPartProps extends PartProps {

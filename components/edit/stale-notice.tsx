@@ -1,5 +1,6 @@
 "use client";
 
+import { useEffect, useRef } from "react";
 import { Notice } from "@/components/ui/notice";
 import { Table, TableBody, TableHead, Td, Th } from "@/components/ui/table";
 import type { ActionState } from "@/lib/shared/action-state";
@@ -21,48 +22,65 @@ interface StaleNoticeProps {
 
 /** Somebody saved first: both versions, field by field. What was typed stays in the form below. */
 export function StaleNotice({ state, labels, href }: StaleNoticeProps) {
-  if (state.state !== "refused" || state.code !== "stale_version" || !state.current) return null;
-  const stored = withUses(flatValues(state.current));
+  const box = useRef<HTMLDivElement>(null);
+  const stale = isStale(state) ? state.current : undefined;
+  useEffect(() => {
+    if (stale) box.current?.focus();
+  }, [stale]);
+  if (!isStale(state) || !stale) return null;
+  const stored = withUses(flatValues(stale));
   const typed = withUses(flatValues(state.values));
   const rows = Object.entries(labels).filter(([name]) => different(stored[name], typed[name]));
   return (
-    <Notice
-      tone="warn"
-      role="alert"
-      title="Somebody saved this anchor while you were typing."
-      className="grid gap-3"
-    >
-      {rows.length === 0 ? (
-        <p>Nothing you typed differs from what is stored now.</p>
-      ) : (
-        <>
-          <Table caption="What is stored now and what you typed" className="mt-2">
-            <TableHead>
-              <tr>
-                <Th>Field</Th>
-                <Th>Stored now</Th>
-                <Th>You typed</Th>
-              </tr>
-            </TableHead>
-            <TableBody>
-              {rows.map(([name, label]) => (
-                <tr key={name}>
-                  <Th scope="row">{label}</Th>
-                  <Td>{stored[name] || "empty"}</Td>
-                  <Td>{typed[name] || "empty"}</Td>
-                </tr>
-              ))}
-            </TableBody>
-          </Table>
-          <p className="pt-2">
-            Change below what should be different, then save again: that stores your version over theirs.{" "}
-            <a href={href} className="underline">
-              See what is stored now
-            </a>
-          </p>
-        </>
-      )}
-    </Notice>
+    <div ref={box} tabIndex={-1}>
+      <Notice tone="warn" role="alert" title="Somebody saved this anchor while you were typing.">
+        <Comparison rows={rows} stored={stored} typed={typed} />
+        <p className="pt-2">
+          {rows.length === 0
+            ? "Nothing you typed differs from what is stored now. "
+            : "Change below what should be different, then save again: that stores your version over theirs. "}
+          <a href={href} className="underline">
+            See what is stored now
+          </a>
+        </p>
+      </Notice>
+    </div>
+  );
+}
+
+type Refused = Extract<ActionState<unknown>, { state: "refused" }>;
+
+export function isStale(state: ActionState<unknown>): state is Refused {
+  return state.state === "refused" && state.code === "stale_version";
+}
+
+interface ComparisonProps {
+  rows: readonly (readonly [name: string, label: string])[];
+  stored: Readonly<Record<string, string>>;
+  typed: Readonly<Record<string, string>>;
+}
+
+function Comparison({ rows, stored, typed }: ComparisonProps) {
+  if (rows.length === 0) return null;
+  return (
+    <Table caption="What is stored now and what you typed" className="mt-2">
+      <TableHead>
+        <tr>
+          <Th>Field</Th>
+          <Th>Stored now</Th>
+          <Th>You typed</Th>
+        </tr>
+      </TableHead>
+      <TableBody>
+        {rows.map(([name, label]) => (
+          <tr key={name}>
+            <Th scope="row">{label}</Th>
+            <Td>{stored[name] || "empty"}</Td>
+            <Td>{typed[name] || "empty"}</Td>
+          </tr>
+        ))}
+      </TableBody>
+    </Table>
   );
 }
 

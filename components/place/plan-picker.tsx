@@ -37,6 +37,13 @@ export function PlanPicker({ marks, picked, onPick }: PlanPickerProps) {
   const xOf = ({ lon }: LonLat) => half.x + (lon - origin.lon) * perLon;
   const yOf = ({ lat }: LonLat) => half.y - (lat - origin.lat) * METRES_PER_DEGREE;
   const dot = Math.max(half.x, half.y) / 40;
+  // A name is left out where it would lie on another: the mark stays, and the list of the site has them all.
+  const named = marks.reduce<PlanPickerProps["marks"]>((kept, mark) => {
+    const covered = kept.some(
+      (one) => Math.abs(xOf(one) - xOf(mark)) < 7 * dot && Math.abs(yOf(one) - yOf(mark)) < 2 * dot,
+    );
+    return covered ? kept : [...kept, mark];
+  }, []);
 
   return (
     <figure className="grid gap-1">
@@ -60,9 +67,11 @@ export function PlanPicker({ marks, picked, onPick }: PlanPickerProps) {
         {marks.map((mark) => (
           <g key={mark.name} transform={`translate(${xOf(mark)} ${yOf(mark)})`}>
             <circle r={dot * 0.7} className="fill-surface stroke-text" strokeWidth={dot / 5} />
-            <text x={dot} y={dot * 0.5} fontSize={dot * 1.6} className="fill-text font-label">
-              {mark.name}
-            </text>
+            {named.includes(mark) ? (
+              <text x={dot} y={dot * 0.5} fontSize={dot * 1.6} className="fill-text font-label">
+                {mark.name}
+              </text>
+            ) : null}
           </g>
         ))}
         {picked ? (

@@ -44,7 +44,7 @@ function AnchorRow({ anchor }: { anchor: AnchorSummary }) {
         </Link>
       </StackCell>
       <StackCell label="Condition">
-        <ConditionMark condition={anchor.condition} verdict={anchor.verdict} className="whitespace-normal" />
+        <ConditionMark condition={anchor.condition} className="whitespace-normal" />
       </StackCell>
       <StackCell label="Verdict">
         {anchor.verdict ? (

@@ -20,10 +20,10 @@ export function DemandTable({ demand }: { demand: AreaDetail["demand"] }) {
           <tr key={row.use}>
             <Th scope="row">{sentence(USE_LABELS[row.use])}</Th>
             <Td numeric>
-              <Quantity value={row.workingKn} unit="kN" />
+              <Quantity value={row.workingKn} unit="kN" digits={1} />
             </Td>
             <Td numeric>
-              <Quantity value={row.peakKn} unit="kN" />
+              <Quantity value={row.peakKn} unit="kN" digits={1} />
               {row.peakStrengthOnly ? <span className="block text-sm text-muted">strength only</span> : null}
             </Td>
             <Td numeric>

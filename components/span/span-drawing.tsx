@@ -65,7 +65,7 @@ function Rim({ x, to, y, bottom }: { x: number; to: number; y: number; bottom: n
   const back = x === 0 ? x : to;
   return (
     <path
-      d={`M${back} ${y + 12} L${lip} ${y + 12} L${lip + (x === 0 ? -6 : 6)} ${y + 44} L${lip + (x === 0 ? 4 : -4)} ${bottom - 26} L${lip + (x === 0 ? -10 : 10)} ${bottom} L${back} ${bottom} Z`}
+      d={`M${back} ${y + 12} L${lip} ${y + 12} L${lip + (x === 0 ? -6 : 6)} ${y + 44} L${lip + (x === 0 ? -1 : 1)} ${bottom - 26} L${lip + (x === 0 ? -12 : 12)} ${bottom} L${back} ${bottom} Z`}
       className="fill-rock stroke-rock-line"
       strokeWidth="1.4"
     />
@@ -101,7 +101,13 @@ function End({ x, y, end, name }: { x: number; y: number; end: SpanView["a"]; na
       <g transform={`translate(${x - 12} ${y - 12})`} className={FILLS[MARK_SHAPES[mark].tone]}>
         <MarkPath mark={mark} />
       </g>
-      <text x={x} y={y + 38} fontSize="17" textAnchor="middle" className="fill-text font-semibold">
+      <text
+        x={name === "A" ? x + 20 : x - 20}
+        y={y + 34}
+        fontSize="18"
+        textAnchor={name === "A" ? "start" : "end"}
+        className="fill-text font-semibold"
+      >
         {name} · {end.code}
       </text>
     </g>

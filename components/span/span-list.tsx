@@ -14,7 +14,10 @@ export function SpanList({ spans }: { spans: readonly SpanView[] }) {
       {spans.map((span) => (
         <StackRow key={span.id}>
           <StackCell head className="max-lg:col-span-1">
-            <Link href={`/spans/${span.id}`} className="inline-block py-1 text-lg font-semibold text-link">
+            <Link
+              href={`/spans/${span.id}`}
+              className="inline-block text-lg font-semibold text-link max-lg:py-1"
+            >
               {span.name}
             </Link>
             <span className="block text-sm text-muted">{span.a.siteName}</span>
@@ -24,7 +27,7 @@ export function SpanList({ spans }: { spans: readonly SpanView[] }) {
           </StackCell>
           {[span.a, span.b].map((end, index) => (
             <StackCell key={end.id} label={index === 0 ? "From" : "To"}>
-              <Link href={`/anchors/${end.code}`} className="inline-block py-1 text-link">
+              <Link href={`/anchors/${end.code}`} className="inline-block text-link max-lg:py-1">
                 <span className="type-code">{end.code}</span> {end.label}
               </Link>
               <ConditionMark

@@ -41,7 +41,7 @@ export function Field(props: FieldProps & { children: ReactNode }) {
   const { label, hint, why, error, optional, className, children } = props;
   const { inputId } = fieldIds(props);
   return (
-    <div className={cx("grid gap-1.5", error && "border-l-4 border-stop-fill pl-3", className)}>
+    <div className={cx("grid content-start gap-1.5", error && "border-l-4 border-stop-fill pl-3", className)}>
       <label htmlFor={inputId} className="text-base font-semibold">
         {label}
         {optional ? <span className="font-normal text-muted"> (optional)</span> : null}

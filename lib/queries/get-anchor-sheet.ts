@@ -95,6 +95,7 @@ function headView({ anchor, site, area, evaluation, lastCheckOn }: Head, exact: 
     rigging: anchor.rigging,
     masterpoint: xMm === null || yMm === null ? null : { xMm, yMm, zMm: zMm ?? 0 },
     washing: anchor.washing ?? site.washing,
+    washingFrom: anchor.washing === null ? ("site" as const) : ("anchor" as const),
     sea: seaView(anchor),
     rowName: anchor.rowName,
     rowLengthM: anchor.rowLengthM,

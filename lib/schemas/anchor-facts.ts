@@ -1,5 +1,6 @@
 import type { AnchorChange } from "@/lib/schemas/anchor";
 import type { AnchorSheet } from "@/lib/schemas/views/anchor";
+import { flatValues } from "@/lib/shared/flat-values";
 
 /** The facts of an anchor that can be corrected, as they are stored. */
 export function anchorFactsOf(sheet: AnchorSheet): AnchorChange {
@@ -17,7 +18,7 @@ export function anchorFactsOf(sheet: AnchorSheet): AnchorChange {
     masterpointXMm: sheet.masterpoint?.xMm ?? null,
     masterpointYMm: sheet.masterpoint?.yMm ?? null,
     masterpointZMm: sheet.masterpoint?.zMm ?? null,
-    washing: sheet.washing,
+    washing: sheet.washingFrom === "anchor" ? sheet.washing : null,
     seaDistanceM: measured?.distanceM ?? null,
     seaDistanceErrorM: measured?.errorM ?? null,
     seaDistanceNote: measured?.note ?? null,
@@ -35,9 +36,12 @@ export function changedFacts(sheet: AnchorSheet, wanted: AnchorChange): AnchorCh
   );
 }
 
-/** Two values that mean the same as the same text: empty is nothing, and words of a list have no order. */
+/**
+ * Two values that mean the same as the same text: empty is nothing, what is stored may have its parts in another
+ * order, and so may the words of a list.
+ */
 function plain(value: unknown): string {
-  const words =
-    Array.isArray(value) && value.every((one) => typeof one === "string") ? value.toSorted() : value;
-  return JSON.stringify(words ?? null, (_key, inner: unknown) => (inner === "" ? null : inner));
+  if (Array.isArray(value) && value.every((one) => typeof one === "string")) return value.toSorted().join();
+  const parts = Object.entries(flatValues(value, "value")).filter(([, text]) => text !== "");
+  return JSON.stringify(parts.toSorted(([a], [b]) => a.localeCompare(b)));
 }

@@ -115,7 +115,7 @@ const rigging = z
 
 const anchorFacts = {
   label: text(80),
-  uses: z.array(oneOf(USES)).min(1, "At least one use.").max(USES.length),
+  uses: z.array(oneOf(USES), "At least one use.").min(1, "At least one use.").max(USES.length),
   pointErrorM: number(0, 10_000).nullable().optional(),
   elevationM: number(-500, 9000).nullable().optional(),
   designAzimuthDeg: azimuthDeg.nullable().optional(),

@@ -194,6 +194,8 @@ export const anchorSheetView = z
       .nullable(),
     masterpoint: z.object({ xMm: z.number(), yMm: z.number(), zMm: z.number() }).nullable(),
     washing: z.enum(WASHINGS).nullable(),
+    /** Whether the anchor has a value of its own, or follows its site. */
+    washingFrom: z.enum(["anchor", "site"]),
     sea: z
       .object({
         distanceM: z.number(),
