@@ -3,11 +3,11 @@ import type { SpanView } from "@/lib/schemas/views/register";
 import { formatBearingDeg, formatQuantity } from "@/lib/shared/format";
 import { MARK_SHAPES, type MarkTone, markOf } from "@/lib/map/marks";
 
-const WIDTH = 720;
-const LEFT = 70;
-const RIGHT = WIDTH - 70;
+const WIDTH = 420;
+const LEFT = 52;
+const RIGHT = WIDTH - LEFT;
 /** A steeper line than this would leave the drawing; the height is then cut and the number tells. */
-const MOST_RISE = 70;
+const MOST_RISE = 50;
 
 const FILLS: Readonly<Record<MarkTone, string>> = {
   calm: "text-calm-fill",
@@ -25,9 +25,9 @@ export function SpanDrawing({ span }: { span: SpanView }) {
   const { lengthM, heightDifferenceM, bearingDeg } = span;
   const scale = lengthM ? (RIGHT - LEFT) / lengthM : 0;
   const rise = Math.max(-MOST_RISE, Math.min(MOST_RISE, (heightDifferenceM ?? 0) * scale));
-  const yA = 74 + Math.max(0, rise);
+  const yA = 62 + Math.max(0, rise);
   const yB = yA - rise;
-  const bottom = Math.max(yA, yB) + 92;
+  const bottom = Math.max(yA, yB) + 70;
   const length = lengthM === null ? "length not shown" : formatQuantity(lengthM, "m", { digits: 1 });
   const words = [
     `${span.a.code} to ${span.b.code}, ${length}`,
@@ -42,7 +42,7 @@ export function SpanDrawing({ span }: { span: SpanView }) {
         viewBox={`0 0 ${WIDTH} ${bottom}`}
         role="img"
         aria-label={`${words.filter((word) => word !== null).join("; ")}.`}
-        className="block h-auto w-full max-w-4xl font-label text-text [font-stretch:80%]"
+        className="block h-auto w-full max-w-2xl font-label text-text [font-stretch:80%]"
       >
         <Rim x={0} to={LEFT} y={yA} bottom={bottom} />
         <Rim x={RIGHT} to={WIDTH} y={yB} bottom={bottom} />
@@ -82,7 +82,7 @@ function Dimension({ yA, yB, label }: { yA: number; yB: number; label: string })
       <text
         x={WIDTH / 2}
         y={y + 7}
-        fontSize="22"
+        fontSize="19"
         textAnchor="middle"
         className="fill-text stroke-surface font-semibold [paint-order:stroke]"
         strokeWidth="14"
@@ -102,9 +102,9 @@ function End({ x, y, end, name }: { x: number; y: number; end: SpanView["a"]; na
         <MarkPath mark={mark} />
       </g>
       <text
-        x={name === "A" ? x + 20 : x - 20}
-        y={y + 34}
-        fontSize="18"
+        x={name === "A" ? x + 16 : x - 16}
+        y={y + 28}
+        fontSize="14"
         textAnchor={name === "A" ? "start" : "end"}
         className="fill-text font-semibold"
       >
