@@ -13,7 +13,7 @@ export function seldomActions(actor: Actor, sheet: AnchorSheet): MenuEntry[] {
     ...(can(actor, "anchor.move", subject) ? [{ label: "Move the anchor", href: `${at}/move` }] : []),
     ...(can(actor, "job.open", subject) ? [{ label: "Open a rebolt", href: `${at}/rebolt` }] : []),
     ...(can(actor, "service.return", subject) && sheet.outOfUseSince && job
-      ? [{ label: "Put back in service", href: `/queue/${job.id}#return` }]
+      ? [{ label: "Put back in service", href: `/queue/${job.id}#put-back` }]
       : []),
   ];
 }

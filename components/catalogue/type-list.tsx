@@ -51,7 +51,9 @@ function TypeRow({ type }: { type: BoltTypeView }) {
           <span className="block text-sm text-muted">discontinued</span>
         ) : null}
       </StackCell>
-      <StackCell label="Metal" className="max-lg:hidden">{metalLabel(type.boltMetal)}</StackCell>
+      <StackCell label="Metal" className="max-lg:hidden">
+        {metalLabel(type.boltMetal)}
+      </StackCell>
       <StackCell wide className="lg:align-middle print:align-middle">
         <StrengthStrip type={type} />
       </StackCell>

@@ -6,7 +6,7 @@ import type { SheetFinding } from "@/lib/schemas/views/anchor";
 export function ReasonIndex({ findings }: { findings: readonly SheetFinding[] }) {
   if (findings.length === 0) return null;
   return (
-    <nav aria-label="Key to the drawing" className="no-print">
+    <nav aria-label="Key to the drawing">
       <ol className="divide-y divide-line border-y border-line">
         {reasonGroups(findings).map((group) => {
           const [reason] = group;
@@ -14,7 +14,7 @@ export function ReasonIndex({ findings }: { findings: readonly SheetFinding[] })
             <li key={reason.number}>
               <a
                 href={`#reason-${reason.number}`}
-                className="grid touch grid-cols-[auto_1fr] items-center gap-x-3 py-1 hover:bg-sunk hover:text-action"
+                className="grid touch grid-cols-[auto_1fr] items-center gap-x-3 py-1 hover:bg-sunk hover:text-action print:min-h-0"
               >
                 <ReasonKey number={reason.number} level={reason.level} />
                 <span className="flex flex-wrap items-baseline justify-between gap-x-4 leading-snug">

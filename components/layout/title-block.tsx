@@ -29,7 +29,7 @@ export function TitleBlock(props: TitleBlockProps) {
         <h1 className="text-3xl [font-stretch:78%]">{name}</h1>
         {condition ? <div className="pt-0.5">{condition}</div> : null}
       </div>
-      <dl className="-mr-px -mb-px grid grid-cols-2 overflow-hidden sm:grid-cols-3 print:grid-cols-4">
+      <dl className="-mr-px -mb-px grid grid-cols-2 overflow-hidden sm:grid-cols-3 print:grid-cols-3">
         {cells.map((cell) => (
           <Cell key={cell.name} name={cell.name}>
             {cell.value}

@@ -20,7 +20,7 @@ export function StackTable({ caption, head, children, className }: StackTablePro
       role="table"
       aria-label={caption}
       className={cx(
-        "block w-full border-collapse border-y-2 border-frame text-left lg:table print:table",
+        "block w-full border-collapse border-y-2 border-frame text-left lg:table print:table print:text-[8pt]",
         className,
       )}
     >
