@@ -9,7 +9,7 @@ import { say } from "./say.mjs";
 /** One vitest project. `args`: files or options for vitest. */
 export async function vitest(project, { env, folder, args = [] }) {
   const report = path.join(folder, `${project}.json`);
-  const reporters = ["--reporter=dot", "--reporter=json", `--outputFile.json=${report}`];
+  const reporters = ["--reporter=default", "--reporter=json", `--outputFile.json=${report}`];
   const code = await tool(["vitest", "run", `--project=${project}`, ...reporters, ...args], env, report);
   return totals(code, report, (results) => ({
     passed: results.numPassedTests,
