@@ -19,6 +19,8 @@ const config: NextConfig = {
   typescript: { ignoreBuildErrors: true },
   experimental: {
     serverActions: { bodySizeLimit: "2mb" },
+    // Writing the cache takes longer than the build it would shorten.
+    turbopackFileSystemCacheForBuild: false,
   },
 };
 
