@@ -52,6 +52,10 @@ export type CompleteJobInput = z.output<typeof complete>;
 
 /** The entry a form is about, in the version its reader saw. What it does is decided by where it is sent. */
 const ref = { id, version: whole(1, 1_000_000_000) };
+/** Nothing ticked sends nothing: it is refused in the words of a list that is empty. */
+export const openReboltJobForm = formInput(
+  openReboltJobInput.extend({ placementIds: openReboltJobInput.shape.placementIds.prefault([]) }),
+);
 export const decideJobForm = formInput(decide.omit({ action: true }).extend(ref));
 export const moveJobForm = formInput(move.omit({ action: true }).extend(ref));
 /** Nobody ticked sends nothing: the job is taken back. */
